@@ -64,17 +64,21 @@ export const resistorLawSchema = z.strictObject({
   resistance: bodyResistance('Resistance'),
 });
 
-/** Dissipation factor with either the thermal time constant or the heat capacity. */
-export const thermalSchema = z.union([
-  z.strictObject({
+/** Dissipation factor with exactly one of thermal time constant and heat capacity (C_th = δ·τ). */
+export const thermalSchema = z
+  .strictObject({
     dissipation: quantity('dissipation', { min: 1e-5, max: 100, describe: 'Dissipation factor δ' }),
-    timeConstant: quantity('time', { min: 0.01, max: 1e4, describe: 'Thermal time constant τ' }),
-  }),
-  z.strictObject({
-    dissipation: quantity('dissipation', { min: 1e-5, max: 100, describe: 'Dissipation factor δ' }),
-    heatCapacity: quantity('heatCapacity', { min: 1e-5, max: 1e4, describe: 'Heat capacity C_th' }),
-  }),
-]);
+    timeConstant: quantity('time', { min: 0.01, max: 1e4, describe: 'Thermal time constant τ' }).optional(),
+    heatCapacity: quantity('heatCapacity', { min: 1e-5, max: 1e4, describe: 'Heat capacity C_th' }).optional(),
+  })
+  .transform((given, context): Thermal => {
+    const { dissipation, timeConstant, heatCapacity } = given;
+    if (timeConstant !== undefined && heatCapacity === undefined) return { dissipation, timeConstant };
+    if (heatCapacity !== undefined && timeConstant === undefined) return { dissipation, heatCapacity };
+    context.addIssue({ code: 'custom', message: 'give either timeConstant or heatCapacity' });
+    return z.NEVER;
+  });
+export type Thermal = { dissipation: number; timeConstant: number } | { dissipation: number; heatCapacity: number };
 
 export const energyBasis = z.enum(['absorbed', 'half-cv2-rms', 'half-cv2-peak', 'unknown']);
 
@@ -132,5 +136,4 @@ export type PartInput = z.input<typeof partSchema>;
 export type PartKind = Part['kind'];
 export type NtcLaw = z.output<typeof ntcLawSchema>;
 export type PolymerPtcLaw = z.output<typeof polymerPtcLawSchema>;
-export type Thermal = z.output<typeof thermalSchema>;
 export type Ratings = z.output<typeof ratingsSchema>;

@@ -63,6 +63,17 @@ export const quantity = (dimension: Dimension, range: QuantityRange) =>
     })
     .meta(metaOf(dimension, range));
 
+/** A quantity, or one word in its place, such as "worst". */
+export const quantityOr = <Word extends string>(word: Word, dimension: Dimension, range: QuantityRange) =>
+  rawQuantity(dimension)
+    .transform((raw, context): number | Word => {
+      if (raw === word) return word;
+      const issue = issueOn(context);
+      const value = readSingle(raw, dimension, issue);
+      return value === null || refuseOutside(value, dimension, range, issue) ? z.NEVER : value;
+    })
+    .meta({ ...metaOf(dimension, range), description: `${metaOf(dimension, range).description}, or "${word}"` });
+
 const toBand = (nominal: number, fraction: number): Toleranced => ({
   nominal,
   min: nominal * (1 - fraction),

@@ -1,18 +1,30 @@
 import { z } from 'zod';
 
-import { quantity, toleranced } from './quantity';
+import { quantity, quantityOr, toleranced, type Toleranced } from './quantity';
 
 /** Impedance ahead of the equipment, entered either way; there is no default. */
-export const impedanceSchema = z.union([
-  z.strictObject({
-    resistance: toleranced('resistance', { min: 0, max: 10e3, describe: 'Source resistance' }),
-    inductance: toleranced('inductance', { min: 0, max: 10e-3, describe: 'Source inductance' }),
-  }),
-  z.strictObject({
-    prospectiveCurrent: toleranced('current', { min: 1, max: 200e3, describe: 'Prospective short-circuit current, A rms' }),
-    reactanceRatio: quantity('count', { min: 0, max: 50, describe: 'X/R of the supply' }),
-  }),
-]);
+export type Impedance =
+  | { resistance: Toleranced; inductance: Toleranced }
+  | { prospectiveCurrent: Toleranced; reactanceRatio: number };
+
+/** One flat object, so that a wrong field is named; exactly one of the two pairs must be whole. */
+export const impedanceSchema = z
+  .strictObject({
+    resistance: toleranced('resistance', { min: 0, max: 10e3, describe: 'Source resistance' }).optional(),
+    inductance: toleranced('inductance', { min: 0, max: 10e-3, describe: 'Source inductance' }).optional(),
+    prospectiveCurrent: toleranced('current', { min: 1, max: 200e3, describe: 'Prospective short-circuit current, A rms' }).optional(),
+    reactanceRatio: quantity('count', { min: 0, max: 50, describe: 'X/R of the supply' }).optional(),
+  })
+  .transform((given, context): Impedance => {
+    const { resistance, inductance, prospectiveCurrent, reactanceRatio } = given;
+    const byElements = resistance !== undefined && inductance !== undefined;
+    const byCurrent = prospectiveCurrent !== undefined && reactanceRatio !== undefined;
+    const count = Object.values(given).filter((value) => value !== undefined).length;
+    if (count === 2 && byElements) return { resistance, inductance };
+    if (count === 2 && byCurrent) return { prospectiveCurrent, reactanceRatio };
+    context.addIssue({ code: 'custom', message: 'give either resistance and inductance, or prospectiveCurrent and reactanceRatio' });
+    return z.NEVER;
+  });
 
 const programmeSchema = z
   .array(
@@ -42,16 +54,12 @@ const common = {
 export const acSourceSchema = z.strictObject({
   kind: z.literal('ac'),
   voltage: toleranced('voltage', { min: 1, max: 1000, describe: 'Line voltage, V rms, with the supply tolerance' }),
-  frequency: z
-    .union([
-      quantity('frequency', { min: 10, max: 1000, describe: 'Line frequency' }),
-      z.array(quantity('frequency', { min: 10, max: 1000, describe: 'Line frequency' })).min(1).max(2),
-    ])
-    .transform((value) => (Array.isArray(value) ? value : [value]))
+  frequencies: z
+    .array(quantity('frequency', { min: 10, max: 1000, describe: 'Line frequency' }))
+    .min(1)
+    .max(2)
     .describe('One frequency, or both that the equipment is allowed on'),
-  phase: z
-    .union([z.literal('worst'), quantity('angle', { min: 0, max: 360, describe: 'Switch-on angle in degrees' })])
-    .default('worst'),
+  phase: quantityOr('worst', 'angle', { min: 0, max: 360, describe: 'Switch-on angle in degrees' }).default('worst'),
   ...common,
 });
 
