@@ -1,0 +1,81 @@
+import type { Factor } from '../../shared/model/corner';
+import type { FactorRange } from './factors';
+import { levelOf, moved, NOMINAL, type Levels } from './levels';
+import { worstPhase } from './worst-phase';
+
+/** Higher is worse; −Infinity where the question has no answer. */
+export type Objective = (levels: Levels, phase: number) => number;
+
+export interface Situation {
+  levels: Levels;
+  /** rad */
+  phase: number;
+}
+
+export interface Search {
+  ranges: readonly FactorRange[];
+  objective: Objective;
+  /** The angle (rad) to use as given, or null to search it. */
+  phase: number | null;
+}
+
+export interface WorstCase {
+  nominal: Situation;
+  worst: Situation;
+}
+
+const MAX_MOVES = 12;
+
+/** Each factor flipped once from `levels`, the others held; the worst level of each. */
+const vertexBySigns = ({ ranges, objective }: Search, from: Situation): Levels => {
+  const base = objective(from.levels, from.phase);
+  return ranges.reduce<Levels>((vertex, { factor, levels }) => {
+    let [worst, value] = [levelOf(from.levels, factor), base];
+    for (const level of levels) {
+      const flipped = objective(moved(from.levels, factor, level), from.phase);
+      if (flipped > value) [worst, value] = [level, flipped];
+    }
+    return moved(vertex, factor, worst);
+  }, NOMINAL);
+};
+
+/** Moves to the worst one-flip neighbour until none is worse: proves that the vertex is a local worst. */
+const climb = ({ ranges, objective }: Search, start: Situation): Situation => {
+  let { levels } = start;
+  let value = objective(levels, start.phase);
+  for (let count = 0; count < MAX_MOVES; count += 1) {
+    let best: { factor: Factor; level: Levels[Factor] & string } | null = null;
+    for (const range of ranges) {
+      for (const level of range.levels) {
+        if (level === levelOf(levels, range.factor)) continue;
+        const flipped = objective(moved(levels, range.factor, level), start.phase);
+        if (flipped > value) [best, value] = [{ factor: range.factor, level }, flipped];
+      }
+    }
+    if (!best) break;
+    levels = moved(levels, best.factor, best.level);
+  }
+  return { levels, phase: start.phase };
+};
+
+/**
+ * The worst corner and switch-on angle of one question: each factor flipped once at the nominal worst
+ * angle, the vertex by the signs, its one-flip neighbours verified, and the angle searched anew there. The
+ * angle can move the answer to another corner, so the last two steps repeat until they agree.
+ */
+export const worstCase = (search: Search): WorstCase => {
+  const { objective, phase } = search;
+  const phaseAt = (levels: Levels, hint?: number): number =>
+    phase ?? worstPhase((angle) => objective(levels, angle), hint).phase;
+  const nominal: Situation = { levels: NOMINAL, phase: phaseAt(NOMINAL) };
+  if (search.ranges.length === 0) return { nominal, worst: nominal };
+  const vertex = vertexBySigns(search, nominal);
+  let worst = climb(search, { levels: vertex, phase: phaseAt(vertex) });
+  for (let round = 0; round < 2 && phase === null; round += 1) {
+    const refined = climb(search, { levels: worst.levels, phase: phaseAt(worst.levels, worst.phase) });
+    const settled = refined.levels === worst.levels;
+    worst = refined;
+    if (settled) break;
+  }
+  return { nominal, worst };
+};
