@@ -10,4 +10,5 @@ export const API = {
   simulations: '/api/simulations',
   health: '/api/health',
   openapi: '/api/openapi.json',
+  docs: '/api/docs',
 } as const;
