@@ -5,7 +5,7 @@ import { createWorkerPool } from '../worker-pool';
 export type PasswordTask = { kind: 'hash'; password: string } | { kind: 'compare'; password: string; hash: string };
 
 /** Hash of a password that nobody has, so that an unknown account takes as long as a known one. */
-const NOBODY = '$2b$11$Cq3wXK0mT7cGx6y4nDp1VeQ8hYk0oB2sJr5uZtLfWvEaXi9dMqNHS';
+const NOBODY = '$2b$11$PN/WKDDWvvtCcURl3tMVYe9RZPJQ0vo0wIcCwOdataMBffRhRuShy';
 
 /** bcrypt in a thread, so that no request waits for another's sign-in. */
 export class Passwords {

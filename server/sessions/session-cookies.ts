@@ -27,7 +27,7 @@ export const readSessionCookies = (request: Request): SessionCookies => {
 
 export const setSessionCookies = (response: Response, tokens: IssuedTokens): void => {
   response.cookie(ACCESS_COOKIE, tokens.access, { ...OPTIONS, maxAge: SESSION_LIMITS.access });
-  if (tokens.refresh !== null) response.cookie(REFRESH_COOKIE, tokens.refresh, { ...OPTIONS, maxAge: SESSION_LIMITS.idle });
+  if (tokens.refresh !== null) response.cookie(REFRESH_COOKIE, tokens.refresh, { ...OPTIONS, maxAge: SESSION_LIMITS.absolute });
 };
 
 export const clearSessionCookies = (response: Response): void => {

@@ -1,12 +1,11 @@
-import { type Scenario, scenarioSchema } from '../../shared/model/scenario';
+import { type Scenario, type ScenarioInput, scenarioSchema } from '../../shared/model/scenario';
 
-/** Invented; walks through the parts of the engine that most scenarios use. */
-export const WARM_UP_SCENARIO: Scenario = scenarioSchema.parse({
+const warmUp: ScenarioInput = {
   name: 'Warm-up',
   source: {
     kind: 'ac',
     voltage: { nominal: '230 V', tolerance: '10 %' },
-    frequency: '50 Hz',
+    frequencies: ['50 Hz'],
     impedance: { resistance: '0R4', inductance: '100u' },
     programme: [{ at: 5, switch: 'off' }, { at: 7, switch: 'on' }],
   },
@@ -15,7 +14,7 @@ export const WARM_UP_SCENARIO: Scenario = scenarioSchema.parse({
       part: {
         kind: 'ntc',
         name: 'Warm-up',
-        law: { law: 'b-value', r25: '10R ±20 %', b: '3k' },
+        law: { law: 'b-value', r25: '10 ±20 %', b: '3k' },
         thermal: { dissipation: '17m', timeConstant: 65 },
         ratings: { maximumTemperature: '170 °C' },
       },
@@ -27,4 +26,7 @@ export const WARM_UP_SCENARIO: Scenario = scenarioSchema.parse({
   load: { kind: 'constant-power', power: 100, startVoltage: 200 },
   ambient: { nominal: '25 °C', min: '-10 °C', max: '60 °C' },
   duration: 10,
-});
+};
+
+/** Invented; walks through the parts of the engine that most scenarios use. */
+export const WARM_UP_SCENARIO: Scenario = scenarioSchema.parse(warmUp);
