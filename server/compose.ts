@@ -4,13 +4,13 @@ import type { Logger } from 'pino';
 import type { DataSource } from 'typeorm';
 
 import type { Simulated } from '../shared/contracts/simulation';
+import type { Clock } from './clock';
 import { HealthService } from './health/health-service';
 import { createApp } from './http/app';
 import { readClientFiles } from './http/client-files';
 import { PartService } from './parts/part-service';
 import { ScenarioService } from './scenarios/scenario-service';
 import { VerdictFiller } from './scenarios/verdict-filler';
-import type { Clock } from './services';
 import { Passwords } from './sessions/passwords';
 import { SessionService } from './sessions/session-service';
 import { SignInLimit } from './sessions/sign-in-limit';

@@ -1,4 +1,3 @@
-import '@swc/core';
 import type { Server } from 'node:http';
 import { setTimeout as wait } from 'node:timers/promises';
 import pino from 'pino';
@@ -63,7 +62,7 @@ const start = async (config: Config): Promise<void> => {
     process.exit(0);
   };
   for (const signal of ['SIGINT', 'SIGTERM'] as const) process.on(signal, () => void stop(signal));
-  console.log(`Tidegate is ready on http://${config.host}:${config.port}`);
+  process.stdout.write(`Tidegate is ready on http://${config.host}:${config.port}\n`);
 };
 
 const explain = (error: unknown): string => {
@@ -77,7 +76,7 @@ const main = async (): Promise<void> => {
   try {
     await start(readConfig(process.env));
   } catch (error) {
-    console.error(explain(error));
+    process.stderr.write(`${explain(error)}\n`);
     process.exit(1);
   }
 };

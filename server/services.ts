@@ -16,5 +16,3 @@ export interface Services {
   parts: PartService;
   simulations: SimulationService;
 }
-
-export type Clock = () => Date;

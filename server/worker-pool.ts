@@ -4,7 +4,7 @@ import { Piscina } from 'piscina';
 const TYPESCRIPT_HOOK = join(__dirname, 'bin', 'typescript-hook.js');
 
 export interface WorkerPoolOptions {
-  /** Full path, with its extension. */
+  /** Full path, with its extension; it exports the task as `run`. */
   filename: string;
   threads: number;
   /** Tasks that may wait; one more is refused. */
@@ -13,4 +13,4 @@ export interface WorkerPoolOptions {
 
 /** Threads that run one TypeScript file; all of them start at once and stay. */
 export const createWorkerPool = <Task, Result>({ filename, threads, maxQueue }: WorkerPoolOptions): Piscina<Task, Result> =>
-  new Piscina<Task, Result>({ filename, minThreads: threads, maxThreads: threads, maxQueue, execArgv: ['-r', TYPESCRIPT_HOOK] });
+  new Piscina<Task, Result>({ filename, name: 'run', minThreads: threads, maxThreads: threads, maxQueue, execArgv: ['-r', TYPESCRIPT_HOOK] });

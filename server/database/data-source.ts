@@ -8,8 +8,7 @@ import { ScenarioRow } from '../scenarios/scenario-entity';
 import { ApiToken } from '../sessions/api-token-entity';
 import { RefreshToken } from '../sessions/refresh-token-entity';
 import { SessionRow } from '../sessions/session-entity';
-import { Person } from '../teams/person-entity';
-import { RoleGrant } from '../teams/role-grant-entity';
+import { Person, RoleGrant } from '../teams/person-entity';
 import { Team } from '../teams/team-entity';
 import { FirstTables1764565200000 } from './migrations/1764565200000-first-tables';
 

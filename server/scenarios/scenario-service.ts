@@ -6,7 +6,7 @@ import type { createScenarioSchema, saveScenarioSchema, scenarioListQuerySchema,
 import type { Scenario } from '../../shared/model/scenario';
 import { containing, pageOf, readCursor } from '../http/cursor';
 import { ProblemError } from '../http/problem-error';
-import type { Clock } from '../services';
+import type { Clock } from '../clock';
 import type { Identity } from '../sessions/identity';
 import { documentHash } from './document-hash';
 import { ScenarioRow } from './scenario-entity';

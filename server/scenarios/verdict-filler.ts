@@ -51,7 +51,8 @@ export class VerdictFiller {
   private async work(): Promise<void> {
     this.wanted = false;
     try {
-      while (!this.closed && (await this.fillOne()));
+      let more = true;
+      while (more && !this.closed) more = await this.fillOne();
     } catch (error) {
       if (this.closed) return;
       this.log.error({ err: error }, 'verdicts wait');

@@ -3,7 +3,7 @@ import type { DataSource, EntityManager } from 'typeorm';
 import type { Logger } from 'pino';
 import { IsNull, LessThan } from 'typeorm';
 
-import type { Clock } from '../services';
+import type { Clock } from '../clock';
 import { signAccessToken, verifyAccessToken } from './access-token';
 import { type Identity, identityOf, WITH_TEAM_AND_ROLES } from './identity';
 import { createOpaqueToken, hashOpaqueToken } from './opaque-token';

@@ -3,7 +3,7 @@ import { type DataSource, IsNull, MoreThan } from 'typeorm';
 import type { z } from 'zod';
 
 import type { createdTokenSchema, createTokenSchema, tokenSchema } from '../../shared/contracts/session';
-import type { Clock } from '../services';
+import type { Clock } from '../clock';
 import { ApiToken } from './api-token-entity';
 import { type Identity, identityOf, WITH_TEAM_AND_ROLES } from './identity';
 import { createOpaqueToken, hashOpaqueToken } from './opaque-token';

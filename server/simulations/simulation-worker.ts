@@ -9,7 +9,7 @@ export interface SimulationTask {
 }
 
 /** Runs in a thread. */
-export default ({ scenario, begun }: SimulationTask): Simulated => {
+export const run = ({ scenario, begun }: SimulationTask): Simulated => {
   Atomics.store(new Int32Array(begun), 0, 1);
   const start = performance.now();
   const assessment = assess(scenario);

@@ -1,6 +1,6 @@
-import { Column, Entity, Index, JoinColumn, ManyToOne, OneToMany, PrimaryColumn, Unique, type Relation } from 'typeorm';
+import { Check, Column, Entity, Index, JoinColumn, ManyToOne, OneToMany, PrimaryColumn, Unique, type Relation } from 'typeorm';
 
-import { RoleGrant } from './role-grant-entity';
+import type { Role } from '../../shared/contracts/session';
 import { Team } from './team-entity';
 
 /** Someone who can sign in. */
@@ -37,4 +37,19 @@ export class Person {
 
   @OneToMany(() => RoleGrant, (grant) => grant.person)
   grants: Relation<RoleGrant[]>;
+}
+
+/** One role that a person holds; one person may hold several. */
+@Entity({ name: 'role_grant' })
+@Check('role_grant_role_check', `"role" IN ('designer', 'librarian', 'test-engineer', 'reviewer', 'admin')`)
+export class RoleGrant {
+  @PrimaryColumn({ name: 'person_id', type: 'uuid', primaryKeyConstraintName: 'role_grant_pkey' })
+  personId: string;
+
+  @ManyToOne(() => Person, (person) => person.grants, { onDelete: 'CASCADE' })
+  @JoinColumn({ name: 'person_id', foreignKeyConstraintName: 'role_grant_person_fkey' })
+  person: Relation<Person>;
+
+  @PrimaryColumn({ type: 'text', primaryKeyConstraintName: 'role_grant_pkey' })
+  role: Role;
 }
