@@ -11,7 +11,7 @@ export const bypassSchema = z.strictObject({
   ]),
   releaseTime: quantity('time', { min: 0, max: 60, describe: 'Time from power-off until it opens' }),
   contactResistance: quantity('resistance', { min: 1e-5, max: 10, describe: 'Contact resistance' }),
-  makingCurrent: quantity('current', { min: 0.1, max: 10e3, describe: 'Making current rating, A peak' }).optional(),
+  makingCurrent: quantity('current', { min: 0.1, max: 10e3, qualifier: 'peak', describe: 'Making current rating, A peak' }).optional(),
   behaviour: z
     .enum(['works', 'never-closes', 'welded'])
     .default('works')

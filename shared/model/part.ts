@@ -86,7 +86,7 @@ export const ratingsSchema = z.strictObject({
   maximumTemperature: bodyTemperature('Highest body temperature').optional(),
   steadyCurrent: z
     .strictObject({
-      current: quantity('current', { min: 1e-3, max: 1000, describe: 'Highest steady current, A rms' }),
+      current: quantity('current', { min: 1e-3, max: 1000, qualifier: 'rms', describe: 'Highest steady current, A rms' }),
       ambient: quantity('temperature', { min: 233.15, max: 473.15, describe: 'Highest ambient at which it holds' }),
       derating: z
         .array(

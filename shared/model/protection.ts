@@ -4,7 +4,7 @@ import { quantity } from './quantity';
 
 export const fuseSchema = z
   .strictObject({
-    ratedCurrent: quantity('current', { min: 0.01, max: 1000, describe: 'Rated current, A rms' }),
+    ratedCurrent: quantity('current', { min: 0.01, max: 1000, qualifier: 'rms', describe: 'Rated current, A rms' }),
     preArcing: z
       .array(
         z.strictObject({
@@ -16,8 +16,8 @@ export const fuseSchema = z
       .default([])
       .describe('Minimum (not typical) pre-arcing curve; a single figure is one point'),
     pulseFactor: quantity('ratio', { min: 0.01, max: 1, describe: 'Share of the pre-arcing I²t allowed for the stated number of starts' }).optional(),
-    deratedCurrent: quantity('current', { min: 0.01, max: 1000, describe: 'Rating at the highest ambient, A rms' }).optional(),
-    breakingCapacity: quantity('current', { min: 1, max: 300e3, describe: 'Breaking capacity, A rms' }).optional(),
+    deratedCurrent: quantity('current', { min: 0.01, max: 1000, qualifier: 'rms', describe: 'Rating at the highest ambient, A rms' }).optional(),
+    breakingCapacity: quantity('current', { min: 1, max: 300e3, qualifier: 'rms', describe: 'Breaking capacity, A rms' }).optional(),
     resistance: quantity('resistance', { min: 0, max: 100, describe: 'Cold resistance' }).default(0),
   })
   .superRefine((fuse, context) => {

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 
-import { DIMENSIONS, type Dimension } from '../quantity/dimension';
+import { DIMENSIONS, type Dimension, type Qualifier } from '../quantity/dimension';
 import { formatQuantity } from '../quantity/format';
 import { parseQuantity, parseTolerancedText } from '../quantity/parse';
 
@@ -11,6 +11,8 @@ export interface QuantityRange {
   max: number;
   /** What the field is, for the JSON Schema. */
   describe: string;
+  /** How a current or voltage is meant; text that says otherwise is refused. */
+  qualifier?: Qualifier;
 }
 
 /** A quantity with its tolerance band resolved. SI. */
@@ -33,10 +35,19 @@ const issueOn =
   (message, path = []) =>
     context.addIssue({ code: 'custom', message, path });
 
-const readSingle = (raw: Raw, dimension: Dimension, issue: Issue): number | null => {
+/** Says why when a value marked rms or peak meets a field that is meant otherwise. */
+const refuseQualifier = (given: Qualifier | null, dimension: Dimension, wanted: Qualifier | undefined, issue: Issue): boolean => {
+  if (given === null || given === wanted) return false;
+  const { unit } = DIMENSIONS[dimension];
+  if (wanted) issue(`this field is in ${unit} ${wanted}, not ${given}; write for example 16 ${unit} ${wanted}`);
+  else issue(`this field takes neither rms nor peak; write it without "${given}"`);
+  return true;
+};
+
+const readSingle = (raw: Raw, dimension: Dimension, wanted: Qualifier | undefined, issue: Issue): number | null => {
   if (typeof raw === 'number') return raw;
   const parsed = parseQuantity(raw, dimension);
-  if (parsed.ok) return parsed.value;
+  if (parsed.ok) return refuseQualifier(parsed.qualifier, dimension, wanted, issue) ? null : parsed.value;
   issue(parsed.message);
   return null;
 };
@@ -51,6 +62,7 @@ const refuseOutside = (value: number, dimension: Dimension, range: QuantityRange
 const metaOf = (dimension: Dimension, range: QuantityRange) => ({
   description: `${range.describe}, from ${formatQuantity(range.min, dimension)} to ${formatQuantity(range.max, dimension)}`,
   unit: DIMENSIONS[dimension].unit,
+  ...(range.qualifier && { qualifier: range.qualifier }),
 });
 
 /** One physical quantity: an SI number or text as an engineer types it; an SI number inside. */
@@ -58,7 +70,7 @@ export const quantity = (dimension: Dimension, range: QuantityRange) =>
   rawQuantity(dimension)
     .transform((raw, context): number => {
       const issue = issueOn(context);
-      const value = readSingle(raw, dimension, issue);
+      const value = readSingle(raw, dimension, range.qualifier, issue);
       return value === null || refuseOutside(value, dimension, range, issue) ? z.NEVER : value;
     })
     .meta(metaOf(dimension, range));
@@ -69,15 +81,15 @@ export const quantityOr = <Word extends string>(word: Word, dimension: Dimension
     .transform((raw, context): number | Word => {
       if (raw === word) return word;
       const issue = issueOn(context);
-      const value = readSingle(raw, dimension, issue);
+      const value = readSingle(raw, dimension, range.qualifier, issue);
       return value === null || refuseOutside(value, dimension, range, issue) ? z.NEVER : value;
     })
     .meta({ ...metaOf(dimension, range), description: `${metaOf(dimension, range).description}, or "${word}"` });
 
-const toBand = (nominal: number, fraction: number): Toleranced => ({
+const toBand = (nominal: number, halfWidth: number): Toleranced => ({
   nominal,
-  min: nominal * (1 - fraction),
-  max: nominal * (1 + fraction),
+  min: nominal - halfWidth,
+  max: nominal + halfWidth,
 });
 
 interface RawBand {
@@ -87,19 +99,29 @@ interface RawBand {
   max?: Raw | undefined;
 }
 
-const readBand = (raw: RawBand, dimension: Dimension, issue: Issue): Toleranced | null => {
+const readBand = (raw: RawBand, dimension: Dimension, wanted: Qualifier | undefined, issue: Issue): Toleranced | null => {
   const read = (key: keyof RawBand, as: Dimension) => {
     const given = raw[key];
-    return given === undefined ? undefined : readSingle(given, as, (message) => issue(message, [key]));
+    return given === undefined ? undefined : readSingle(given, as, wanted, (message) => issue(message, [key]));
   };
+  // A share of an absolute temperature means nothing: there the tolerance is in kelvin.
+  const absolute = dimension === 'temperature';
   const nominal = read('nominal', dimension);
-  const tolerance = read('tolerance', 'ratio');
+  const tolerance = read('tolerance', absolute ? 'temperatureInterval' : 'ratio');
   const [min, max] = [read('min', dimension), read('max', dimension)];
   if (nominal === null || nominal === undefined || tolerance === null || min === null || max === null) return null;
   if (tolerance === undefined) return { nominal, min: min ?? nominal, max: max ?? nominal };
   if (min !== undefined || max !== undefined) issue('give either a tolerance or min and max, not both');
-  else if (tolerance >= 0 && tolerance < 1) return toBand(nominal, tolerance);
-  else issue('the tolerance is outside 0 % to 99.9 %', ['tolerance']);
+  else if (absolute && tolerance >= 0) return toBand(nominal, tolerance);
+  else if (!absolute && tolerance >= 0 && tolerance < 1) return toBand(nominal, nominal * tolerance);
+  else issue(absolute ? 'the tolerance is below 0 K' : 'the tolerance is outside 0 % to 99.9 %', ['tolerance']);
+  return null;
+};
+
+const readText = (text: string, dimension: Dimension, wanted: Qualifier | undefined, issue: Issue): Toleranced | null => {
+  const parsed = parseTolerancedText(text, dimension);
+  if (parsed.ok) return refuseQualifier(parsed.qualifier, dimension, wanted, issue) ? null : toBand(parsed.value, parsed.halfWidth);
+  issue(parsed.message);
   return null;
 };
 
@@ -111,7 +133,7 @@ export const toleranced = (dimension: Dimension, range: QuantityRange) => {
   const raw = rawQuantity(dimension);
   const object = z.strictObject({
     nominal: raw,
-    tolerance: rawQuantity('ratio').optional(),
+    tolerance: rawQuantity(dimension === 'temperature' ? 'temperatureInterval' : 'ratio').optional(),
     min: raw.optional(),
     max: raw.optional(),
   });
@@ -121,14 +143,10 @@ export const toleranced = (dimension: Dimension, range: QuantityRange) => {
     })
     .transform((given, context): Toleranced => {
       const issue = issueOn(context);
-      let band: Toleranced | null = null;
+      let band: Toleranced | null;
       if (typeof given === 'number') band = toBand(given, 0);
-      else if (typeof given === 'object') band = readBand(given, dimension, issue);
-      else {
-        const parsed = parseTolerancedText(given, dimension);
-        if (parsed.ok) band = toBand(parsed.value, parsed.tolerance);
-        else issue(parsed.message);
-      }
+      else if (typeof given === 'string') band = readText(given, dimension, range.qualifier, issue);
+      else band = readBand(given, dimension, range.qualifier, issue);
       if (!band) return z.NEVER;
       for (const value of [band.min, band.max, band.nominal]) {
         if (refuseOutside(value, dimension, range, issue)) return z.NEVER;

@@ -11,11 +11,11 @@ import { sourceSchema } from './source';
 
 /** What the person asks of the design; each absent limit leaves its check "not assessed". */
 export const limitsSchema = z.strictObject({
-  peakCurrent: quantity('current', { min: 0.01, max: 100e3, describe: 'Highest inrush current allowed, A peak' }).optional(),
+  peakCurrent: quantity('current', { min: 0.01, max: 100e3, qualifier: 'peak', describe: 'Highest inrush current allowed, A peak' }).optional(),
   limiterLoss: quantity('power', { min: 1e-3, max: 10e3, describe: 'Highest steady loss allowed in the limiter' }).optional(),
   timeToTrip: quantity('time', { min: 1e-3, max: 3600, describe: 'Time allowed for a PTC to trip on the fault' }).optional(),
   voltageDrop: quantity('voltage', { min: 1e-3, max: 100, describe: 'Highest drop allowed over a PTC in operation' }).optional(),
-  steadyCurrent: quantity('current', { min: 1e-3, max: 1000, describe: 'Highest operating current that a PTC must hold, A rms' }).optional(),
+  steadyCurrent: quantity('current', { min: 1e-3, max: 1000, qualifier: 'rms', describe: 'Highest operating current that a PTC must hold, A rms' }).optional(),
 });
 export type Limits = z.output<typeof limitsSchema>;
 

@@ -12,7 +12,7 @@ export const impedanceSchema = z
   .strictObject({
     resistance: toleranced('resistance', { min: 0, max: 10e3, describe: 'Source resistance' }).optional(),
     inductance: toleranced('inductance', { min: 0, max: 10e-3, describe: 'Source inductance' }).optional(),
-    prospectiveCurrent: toleranced('current', { min: 1, max: 200e3, describe: 'Prospective short-circuit current, A rms' }).optional(),
+    prospectiveCurrent: toleranced('current', { min: 1, max: 200e3, qualifier: 'rms', describe: 'Prospective short-circuit current, A rms' }).optional(),
     reactanceRatio: quantity('count', { min: 0, max: 50, describe: 'X/R of the supply' }).optional(),
   })
   .transform((given, context): Impedance => {
@@ -53,7 +53,7 @@ const common = {
 
 export const acSourceSchema = z.strictObject({
   kind: z.literal('ac'),
-  voltage: toleranced('voltage', { min: 1, max: 1000, describe: 'Line voltage, V rms, with the supply tolerance' }),
+  voltage: toleranced('voltage', { min: 1, max: 1000, qualifier: 'rms', describe: 'Line voltage, V rms, with the supply tolerance' }),
   frequencies: z
     .array(quantity('frequency', { min: 10, max: 1000, describe: 'Line frequency' }))
     .min(1)
