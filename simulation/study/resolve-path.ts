@@ -12,6 +12,8 @@ import { impedanceAt } from './source-impedance';
 const STOP_SHARE = 0.7;
 /** Of the nominal bus, below which a converter's input current is clamped. */
 const CLAMP_SHARE = 0.3;
+/** V; keeps the clamp above zero where the diodes would take the whole supply. */
+const LOWEST_BUS = 0.1;
 
 export const atLevel = (band: Toleranced, level: Level): number => ({ low: band.min, nominal: band.nominal, high: band.max })[level];
 
@@ -70,7 +72,7 @@ const loadOf = (scenario: Scenario, load: Load): PathLoad =>
         stopVoltage: load.stopVoltage ?? STOP_SHARE * load.startVoltage,
         startDelay: load.startDelay,
         rampTime: load.rampTime,
-        clampVoltage: CLAMP_SHARE * Math.max(nominalBus(scenario), load.startVoltage),
+        clampVoltage: CLAMP_SHARE * Math.max(nominalBus(scenario), LOWEST_BUS),
       }
     : load;
 
