@@ -18,7 +18,7 @@ import { SignInService } from './sessions/sign-in-service';
 import { TokenService } from './sessions/token-service';
 import { SimulationService } from './simulations/simulation-service';
 import type { SimulationTask } from './simulations/simulation-worker';
-import { createWorkerPool } from './worker-pool';
+import { WorkerPool } from './worker-pool';
 
 export interface Settings {
   database: DataSource;
@@ -46,10 +46,10 @@ const MOST_WAITING_RUNS = 16;
 export const compose = ({ database, sessionSecret, staticDir, log, clock = () => new Date(), simulationWorker }: Settings): Composed => {
   const passwords = new Passwords();
   const simulations = new SimulationService(
-    createWorkerPool<SimulationTask, Simulated>({
+    new WorkerPool<SimulationTask, Simulated>({
       filename: simulationWorker ?? join(__dirname, 'simulations', 'simulation-worker.ts'),
       threads: SIMULATION_THREADS,
-      maxQueue: MOST_WAITING_RUNS,
+      mostWaiting: MOST_WAITING_RUNS,
     }),
   );
   const verdicts = new VerdictFiller(database, simulations, log);

@@ -2,16 +2,15 @@ import { z } from 'zod';
 
 import { ProblemError } from './problem-error';
 
-const keySchema = z.tuple([z.string(), z.uuid()]);
-
 /** Where a page ended: the value it was sorted by and the id, which makes the order total. */
-export type PageKey = z.output<typeof keySchema>;
+export type PageKey = [string, string];
 
 export const writeCursor = (key: PageKey): string => Buffer.from(JSON.stringify(key)).toString('base64url');
 
-export const readCursor = (cursor: string): PageKey => {
+/** @param sortedBy what the first half of the key must look like */
+export const readCursor = (cursor: string, sortedBy: z.ZodType<string>): PageKey => {
   try {
-    return keySchema.parse(JSON.parse(Buffer.from(cursor, 'base64url').toString()));
+    return z.tuple([sortedBy, z.uuid()]).parse(JSON.parse(Buffer.from(cursor, 'base64url').toString()));
   } catch {
     throw new ProblemError('invalid-input', 'after: is not a cursor of this list', {
       issues: [{ path: 'after', message: 'is not a cursor of this list; take it from `next` of the page before' }],

@@ -33,9 +33,18 @@ const parse = express.json({
   },
 });
 
+/** Neither fits into PostgreSQL: U+0000, and half of a surrogate pair. */
+const UNSTORABLE = /\0|\p{Surrogate}/u;
+
+const holdsUnstorable = (value: unknown): boolean => {
+  if (typeof value === 'string') return UNSTORABLE.test(value);
+  return typeof value === 'object' && value !== null && Object.values(value).some(holdsUnstorable);
+};
+
 /** Reads the body into `request.body`, only once the caller is known to be allowed to send one. */
 export const readJsonBody = async (request: Request, response: Response): Promise<void> => {
   if (request.headers['content-type'] !== undefined && !request.is('application/json'))
     throw new ProblemError('unsupported-media', 'Send application/json.');
   await new Promise<void>((resolve, reject) => parse(request, response, (error?: unknown) => (error ? reject(error) : resolve())));
+  if (holdsUnstorable(request.body)) throw new ProblemError('malformed-body', 'The body holds the character U+0000 or half of a surrogate pair.');
 };

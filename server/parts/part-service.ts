@@ -1,6 +1,7 @@
 import type { DataSource } from 'typeorm';
-import type { z } from 'zod';
+import { z } from 'zod';
 
+import { storableText } from '../../shared/contracts/text';
 import type { partListQuerySchema, partListSchema, PartRecord } from '../../shared/contracts/part';
 import { containing, pageOf, readCursor } from '../http/cursor';
 import { ProblemError } from '../http/problem-error';
@@ -25,7 +26,7 @@ export class PartService {
     if (query.kind) rows.andWhere('part.kind = :kind', { kind: query.kind });
     if (query.search) rows.andWhere('part.name ILIKE :pattern', { pattern: containing(query.search) });
     if (query.after !== undefined) {
-      const [name, id] = readCursor(query.after);
+      const [name, id] = readCursor(query.after, storableText);
       rows.andWhere('(part.name, part.id) > (:name, CAST(:id AS uuid))', { name, id });
     }
     const { page, next } = pageOf(await rows.getMany(), query.limit, (row) => [row.name, row.id]);

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { DataSource } from 'typeorm';
-import type { z } from 'zod';
+import { z } from 'zod';
 
 import type { createScenarioSchema, saveScenarioSchema, scenarioListQuerySchema, scenarioListSchema, ScenarioRecord } from '../../shared/contracts/scenario';
 import type { Scenario } from '../../shared/model/scenario';
@@ -44,7 +44,7 @@ export class ScenarioService {
       .limit(query.limit + 1);
     if (query.search) rows.andWhere('scenario.name ILIKE :pattern', { pattern: containing(query.search) });
     if (query.after !== undefined) {
-      const [at, id] = readCursor(query.after);
+      const [at, id] = readCursor(query.after, z.iso.datetime());
       rows.andWhere('(scenario.updatedAt, scenario.id) < (CAST(:at AS timestamptz), CAST(:id AS uuid))', { at: new Date(at), id });
     }
     const { page, next } = pageOf(await rows.getMany(), query.limit, (row) => [row.updatedAt.toISOString(), row.id]);

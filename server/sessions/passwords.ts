@@ -1,6 +1,6 @@
 import { join } from 'node:path';
 
-import { createWorkerPool } from '../worker-pool';
+import { WorkerPool } from '../worker-pool';
 
 export type PasswordTask = { kind: 'hash'; password: string } | { kind: 'compare'; password: string; hash: string };
 
@@ -9,10 +9,10 @@ const NOBODY = '$2b$11$PN/WKDDWvvtCcURl3tMVYe9RZPJQ0vo0wIcCwOdataMBffRhRuShy';
 
 /** bcrypt in a thread, so that no request waits for another's sign-in. */
 export class Passwords {
-  private readonly pool = createWorkerPool<PasswordTask, string | boolean>({
+  private readonly pool = new WorkerPool<PasswordTask, string | boolean>({
     filename: join(__dirname, 'password-worker.ts'),
     threads: 1,
-    maxQueue: 50,
+    mostWaiting: 50,
   });
 
   async hash(password: string): Promise<string> {
@@ -26,6 +26,6 @@ export class Passwords {
   }
 
   async close(): Promise<void> {
-    await this.pool.destroy();
+    await this.pool.close();
   }
 }

@@ -1,8 +1,6 @@
-import type { Piscina } from 'piscina';
-
 import type { Simulated } from '../../shared/contracts/simulation';
 import type { Scenario } from '../../shared/model/scenario';
-import { ProblemError } from '../http/problem-error';
+import type { WorkerPool } from '../worker-pool';
 import type { SimulationTask } from './simulation-worker';
 import { WARM_UP_SCENARIO } from './warm-up-scenario';
 
@@ -10,9 +8,8 @@ import { WARM_UP_SCENARIO } from './warm-up-scenario';
 const LET_FINISH = 1000;
 /** No scenario takes nearly as long; a run that does is a mistake of ours and must not hold a thread for ever. */
 const TIME_LIMIT = 30_000;
-const RETRY_AFTER = 2;
 
-export type SimulationPool = Piscina<SimulationTask, Simulated>;
+export type SimulationPool = WorkerPool<SimulationTask, Simulated>;
 
 /** Runs the engine in threads, so that the thread that answers requests stays free. */
 export class SimulationService {
@@ -20,13 +17,12 @@ export class SimulationService {
 
   /** Computes once in every thread, so that the first person does not wait for the code to be loaded and compiled. */
   async warmUp(): Promise<{ engineVersion: string }> {
-    const runs = await Promise.all(Array.from({ length: this.pool.options.maxThreads }, () => this.assess(WARM_UP_SCENARIO)));
+    const runs = await Promise.all(Array.from({ length: this.pool.threads }, () => this.assess(WARM_UP_SCENARIO)));
     return { engineVersion: runs[0]!.assessment.engineVersion };
   }
 
   /**
    * @param signal of a client that may hang up: what waits is dropped at once, what runs is given a moment to end by itself
-   * @throws {ProblemError} busy, when too many runs wait already
    */
   async assess(scenario: Scenario, signal?: AbortSignal): Promise<Simulated> {
     const begun = new SharedArrayBuffer(4);
@@ -39,11 +35,7 @@ export class SimulationService {
     if (signal?.aborted) hangUp();
     signal?.addEventListener('abort', hangUp, { once: true });
     try {
-      return await this.pool.run({ scenario, begun }, { signal: stop.signal });
-    } catch (error) {
-      if (error instanceof Error && /queue is at limit/.test(error.message))
-        throw new ProblemError('busy', 'Other runs are waiting already; try again in a moment.', { retryAfter: RETRY_AFTER, cause: error });
-      throw error;
+      return await this.pool.run({ scenario, begun }, stop.signal);
     } finally {
       timers.forEach(clearTimeout);
       signal?.removeEventListener('abort', hangUp);
@@ -51,6 +43,6 @@ export class SimulationService {
   }
 
   async close(): Promise<void> {
-    await this.pool.destroy();
+    await this.pool.close();
   }
 }

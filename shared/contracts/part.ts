@@ -1,6 +1,7 @@
 import { z } from 'zod';
 
 import { partSchema } from '../model/part';
+import { searchText } from './text';
 
 export const partSummarySchema = z.object({
   id: z.uuid(),
@@ -13,7 +14,7 @@ export type PartSummary = z.output<typeof partSummarySchema>;
 export const partListSchema = z.object({ parts: z.array(partSummarySchema), next: z.string().nullable() });
 export const partListQuerySchema = z.strictObject({
   after: z.string().max(200).optional(),
-  search: z.string().trim().max(120).optional(),
+  search: searchText.optional(),
   kind: z.enum(['ntc', 'polymer-ptc', 'resistor']).optional(),
   limit: z.coerce.number().int().min(1).max(200).default(100),
 });

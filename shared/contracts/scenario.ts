@@ -3,6 +3,7 @@ import { z } from 'zod';
 import { checkSchema } from '../model/check';
 import { verdictSchema } from '../model/result';
 import { scenarioSchema } from '../model/scenario';
+import { searchText } from './text';
 
 /** The blocks of the path in order, for the glyph in a list. */
 export const pathGlyphSchema = z.object({
@@ -33,7 +34,7 @@ export const scenarioListSchema = z.object({
 });
 export const scenarioListQuerySchema = z.strictObject({
   after: z.string().max(200).optional(),
-  search: z.string().trim().max(120).optional(),
+  search: searchText.optional(),
   limit: z.coerce.number().int().min(1).max(200).default(50),
 });
 
