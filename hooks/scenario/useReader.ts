@@ -1,12 +1,17 @@
 import { useCallback, useEffect, useState } from 'react';
 
-export type Reader = typeof import('./read-draft');
+import type * as readDraft from './read-draft';
+
+export type Reader = typeof readDraft;
 
 let loaded: Reader | null = null;
 let loading: Promise<Reader> | null = null;
 
 const load = (): Promise<Reader> => {
-  loading ??= import('./read-draft').then((reader) => (loaded = reader));
+  loading ??= import('./read-draft').then(async (reader) => {
+    await reader.loadUnits();
+    return (loaded = reader);
+  });
   loading.catch(() => (loading = null));
   return loading;
 };

@@ -8,6 +8,9 @@ import type { Scenario, ScenarioInput } from '@/shared/model/scenario';
 
 type ScenarioList = z.output<typeof scenarioListSchema>;
 
+/** A saved draft gets its verdict in the background; until then the list asks again. */
+const VERDICT_EVERY_MS = 1500;
+
 const LISTS = ['scenarios', 'list'] as const;
 const recordKey = (id: string) => ['scenarios', 'record', id] as const;
 
@@ -27,6 +30,7 @@ export const useScenarios = (search: string) =>
     initialPageParam: null as string | null,
     getNextPageParam: (last) => last.next,
     placeholderData: keepPreviousData,
+    refetchInterval: ({ state }) => (state.data?.pages.some((page) => page.scenarios.some(({ verdict }) => !verdict)) ? VERDICT_EVERY_MS : false),
     select: (data) => data.pages.flatMap((page) => page.scenarios),
   });
 

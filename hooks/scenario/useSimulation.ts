@@ -39,9 +39,7 @@ export const useSimulation = (scenario: Scenario) => {
   });
   const { data, isPlaceholderData } = query;
   const [lastGood, setLastGood] = useState<Simulated | null>(null);
-  useEffect(() => {
-    if (data && !isPlaceholderData) setLastGood(data);
-  }, [data, isPlaceholderData]);
+  if (data && data !== lastGood) setLastGood(data);
   const shown = data ?? lastGood;
   return {
     assessment: shown?.assessment ?? null,

@@ -1,9 +1,6 @@
 const stored = (userId: string) => `tidegate.welcomed.${userId}`;
 
-/** True the first time that this person comes in with this browser, and only then. */
-export const takeWelcome = (userId: string): boolean => {
-  const store = globalThis.localStorage;
-  if (!store || store.getItem(stored(userId))) return false;
-  store.setItem(stored(userId), new Date().toISOString());
-  return true;
-};
+/** Whether this person has been here with this browser before. */
+export const wasWelcomed = (userId: string): boolean => Boolean(globalThis.localStorage?.getItem(stored(userId)));
+
+export const markWelcomed = (userId: string): void => globalThis.localStorage?.setItem(stored(userId), new Date().toISOString());

@@ -1,0 +1,5 @@
+import { PartListScreen } from '@/components/part/PartListScreen';
+
+export default function Parts() {
+  return <PartListScreen />;
+}

@@ -1,0 +1,5 @@
+import { FirstPlace } from '@/components/session/FirstPlace';
+
+export default function Index() {
+  return <FirstPlace />;
+}
