@@ -25,9 +25,11 @@ export interface Toleranced {
 type Raw = number | string;
 type Issue = (message: string, path?: string[]) => void;
 
+const missingOr = (input: unknown) => (input === undefined ? 'is missing: ' : '');
+
 const rawQuantity = (dimension: Dimension) =>
   z.union([z.number(), z.string().max(64)], {
-    error: `write a number in ${DIMENSIONS[dimension].unit || 'units of one'}, or text such as "${DIMENSIONS[dimension].example}"`,
+    error: ({ input }) => `${missingOr(input)}write a number in ${DIMENSIONS[dimension].unit || 'units of one'}, or text such as "${DIMENSIONS[dimension].example}"`,
   });
 
 const issueOn =
@@ -139,7 +141,7 @@ export const toleranced = (dimension: Dimension, range: QuantityRange) => {
   });
   return z
     .union([z.number(), z.string().max(64), object], {
-      error: `write a value such as "${DIMENSIONS[dimension].example}", or an object with nominal and either tolerance, or min and max`,
+      error: ({ input }) => `${missingOr(input)}write a value such as "${DIMENSIONS[dimension].example}", or an object with nominal and either tolerance, or min and max`,
     })
     .transform((given, context): Toleranced => {
       const issue = issueOn(context);
