@@ -1,0 +1,3 @@
+export default async function stopCluster() {
+  await globalThis.testCluster?.stop();
+}
