@@ -7,7 +7,7 @@ import type { Levels } from './levels';
 import { offTimesOf } from './off-times';
 import { bulkAt, voltageAt } from './resolve-path';
 import { restartLevels, restartState, searchSoak, soakState, type SoakState } from './restart';
-import { givenPhase, type Studied } from './studied';
+import { givenPhase, roundedDegrees, type Studied } from './studied';
 import type { Trials } from './trials';
 import { worstCase } from './worst-case';
 
@@ -73,7 +73,7 @@ const studyElement = (trials: Trials, index: number, part: Part): Studied => {
     value: top.energy,
     nominal: nominal.energy,
     corner: cornerOf(trials.ranges, levels),
-    phase: source.kind === 'ac' ? (phase * 180) / Math.PI : null,
+    phase: source.kind === 'ac' ? roundedDegrees(phase) : null,
     offTime: top.offTime,
   };
   const start = { worst: top.start, nominal: nominal.start };

@@ -24,7 +24,8 @@ export const givenPhase = ({ source }: Scenario): number | null => {
 export const searchWorst = (trials: Trials, objective: Objective, held?: number): WorstCase =>
   worstCase({ ranges: trials.ranges, objective, phase: givenPhase(trials.scenario) ?? held ?? null });
 
-const roundedDegrees = (phase: number): number => Math.round((phase / DEGREE) * 10) / 10;
+/** Degrees to a tenth, as reported. */
+export const roundedDegrees = (phase: number): number => Math.round((phase / DEGREE) * 10) / 10;
 
 /** `value` in the worst and the nominal situation, with the worst one's corner and angle. */
 export const findingOf = (

@@ -1,6 +1,6 @@
-import type { Factor } from '../../shared/model/corner';
+import type { Level } from '../../shared/model/corner';
 import type { FactorRange } from './factors';
-import { levelOf, moved, NOMINAL, type Levels } from './levels';
+import { keyOf, levelOf, moved, NOMINAL, type Levels } from './levels';
 import { worstPhase } from './worst-phase';
 
 /** Higher is worse; −Infinity where the question has no answer. */
@@ -39,29 +39,36 @@ const vertexBySigns = ({ ranges, objective }: Search, from: Situation): Levels =
   }, NOMINAL);
 };
 
+/** The levels to try against the one a factor stands at; from one end of a range the other end. */
+const opposites = ({ factor, levels: all }: FactorRange, levels: Levels): Level[] => {
+  const current = levelOf(levels, factor);
+  const ends = all.filter((level) => level !== current && level !== 'nominal');
+  return ends.length > 0 ? ends : all.filter((level) => level !== current);
+};
+
 /** Moves to the worst one-flip neighbour until none is worse: proves that the vertex is a local worst. */
-const climb = ({ ranges, objective }: Search, start: Situation): Situation => {
-  let { levels } = start;
-  let value = objective(levels, start.phase);
+const climb = ({ ranges, objective }: Search, { levels: start, phase }: Situation): Situation => {
+  let levels = start;
+  let value = objective(levels, phase);
   for (let count = 0; count < MAX_MOVES; count += 1) {
-    let best: { factor: Factor; level: Levels[Factor] & string } | null = null;
+    let best = levels;
     for (const range of ranges) {
-      for (const level of range.levels) {
-        if (level === levelOf(levels, range.factor)) continue;
-        const flipped = objective(moved(levels, range.factor, level), start.phase);
-        if (flipped > value) [best, value] = [{ factor: range.factor, level }, flipped];
+      for (const level of opposites(range, levels)) {
+        const neighbour = moved(levels, range.factor, level);
+        const flipped = objective(neighbour, phase);
+        if (flipped > value) [best, value] = [neighbour, flipped];
       }
     }
-    if (!best) break;
-    levels = moved(levels, best.factor, best.level);
+    if (best === levels) break;
+    levels = best;
   }
-  return { levels, phase: start.phase };
+  return { levels, phase };
 };
 
 /**
  * The worst corner and switch-on angle of one question: each factor flipped once at the nominal worst
  * angle, the vertex by the signs, its one-flip neighbours verified, and the angle searched anew there. The
- * angle can move the answer to another corner, so the last two steps repeat until they agree.
+ * angle follows when the neighbours move the corner.
  */
 export const worstCase = (search: Search): WorstCase => {
   const { objective, phase } = search;
@@ -70,12 +77,11 @@ export const worstCase = (search: Search): WorstCase => {
   const nominal: Situation = { levels: NOMINAL, phase: phaseAt(NOMINAL) };
   if (search.ranges.length === 0) return { nominal, worst: nominal };
   const vertex = vertexBySigns(search, nominal);
-  let worst = climb(search, { levels: vertex, phase: phaseAt(vertex) });
-  for (let round = 0; round < 2 && phase === null; round += 1) {
-    const refined = climb(search, { levels: worst.levels, phase: phaseAt(worst.levels, worst.phase) });
-    const settled = refined.levels === worst.levels;
-    worst = refined;
-    if (settled) break;
+  let worst = climb(search, { levels: vertex, phase: phaseAt(vertex, nominal.phase) });
+  for (let round = 0; round < 2 && keyOf(worst.levels) !== keyOf(vertex) && phase === null; round += 1) {
+    const { levels } = worst;
+    worst = climb(search, { levels, phase: phaseAt(levels, worst.phase) });
+    if (worst.levels === levels) break;
   }
   return { nominal, worst };
 };
