@@ -10,7 +10,6 @@ export default function Html({ children }: { children: ReactNode }) {
         <meta charSet="utf-8" />
         <meta name="viewport" content="width=device-width, initial-scale=1" />
         <meta name="description" content="Sizes NTC inrush current limiters and PTC resettable fuses, and proves the choice by computation." />
-        <title>Tidegate</title>
         <style dangerouslySetInnerHTML={{ __html: themeCss + pageCss }} />
       </head>
       <body>{children}</body>

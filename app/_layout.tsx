@@ -1,6 +1,7 @@
 import { QueryClientProvider } from '@tanstack/react-query';
 import { FontDisplay, useFonts } from 'expo-font';
 import { Stack, type ErrorBoundaryProps } from 'expo-router';
+import Head from 'expo-router/head';
 import { useState } from 'react';
 import { View } from 'react-native';
 
@@ -32,6 +33,7 @@ export default function RootLayout() {
   const [queryClient] = useState(makeQueryClient);
   return (
     <ThemeProvider>
+      <Head><title>Tidegate</title></Head>
       <QueryClientProvider client={queryClient}>
         <Pages />
       </QueryClientProvider>

@@ -21,7 +21,7 @@ export interface CheckRowProps {
 }
 
 /** Widths that hold four digits before the point and two behind it, so that points stand under one another. */
-const COLUMN = { whole: 34, fraction: 22, rating: 76 } as const;
+const COLUMN = { whole: 32, fraction: 26, rating: 62 } as const;
 
 const split = (digits: string): [string, string] => {
   const point = digits.indexOf('.');
@@ -82,7 +82,7 @@ export const CheckRow = ({ check, tight = false, stale = false, selected = false
       </View>
       <View style={{ marginTop: tight ? 0 : 5 }}><MarginBar check={check} variant={tight ? 'tight' : 'full'} stale={stale} ground={ground} silent /></View>
       <View style={{ flexDirection: 'row', gap: 7, marginTop: tight ? 0 : 3 }}>
-        <Text variant="secondary" tone="quiet" numberOfLines={1} style={{ flex: 1, lineHeight: tight ? 15 : 16 }}>{text.corner}</Text>
+        <Text variant="secondary" tone="quiet" numberOfLines={tight ? 1 : 2} style={{ flex: 1, lineHeight: tight ? 15 : 16 }}>{text.corner}</Text>
         <Text variant="secondary" strong tone={grey ? 'quiet' : STATUS_COLOR[check.status]} style={{ lineHeight: tight ? 15 : 16 }}>{text.word}</Text>
       </View>
       {selected ? <View style={{ position: 'absolute', left: -12, top: 0, bottom: 0, width: 4, backgroundColor: colors.ink }} /> : null}

@@ -1,5 +1,6 @@
-import { Defs, G, Line, LinearGradient, Path, Rect, Stop } from 'react-native-svg';
+import { Defs, G, Line, LinearGradient, Path, Rect, Stop, TSpan } from 'react-native-svg';
 
+import { FAMILY } from '@/components/ui/Text';
 import type { Palette } from '@/components/ui/tokens';
 
 import type { Lane } from './lanes';
@@ -93,10 +94,10 @@ export const PlotFrame = ({ lanes, room, scale, colors }: FrameProps) => (
     {lanes.map((lane, index) => {
       const y = room.lanes[index]!.top - (index === 0 ? 9 : 5);
       return (
-        <G key={lane.key}>
-          <PlotText x={room.left} y={y} size={room.fontSize} strong fill={colors[lane.tone]}>{lane.title}</PlotText>
-          <PlotText x={room.left + textWidth(lane.title, room.fontSize * 1.06) + 6} y={y} size={room.fontSize} fill={colors.quiet}>{lane.unit}</PlotText>
-        </G>
+        <PlotText key={lane.key} x={room.left} y={y} size={room.fontSize} strong fill={colors[lane.tone]}>
+          {lane.title}
+          <TSpan fontFamily={FAMILY.text} fill={colors.quiet}>{` ${lane.unit}`}</TSpan>
+        </PlotText>
       );
     })}
     {scale.fold ? <PlotText x={scale.fold.left - 4} y={13} anchor="end" size={room.fontSize} fill={colors.quiet}>waveform, linear</PlotText> : null}

@@ -9,7 +9,6 @@ import type { PlacedEvent } from './place-events';
 import { EVENT_ROW, type PlotRoom } from './plot-room';
 import { PlotText } from './PlotText';
 import { timeText, type TimeScale } from './time-scale';
-import { valueAt } from './thin-out';
 
 interface MarksProps {
   lanes: readonly Lane[];
@@ -58,34 +57,13 @@ const Events = ({ events, room, colors }: Pick<MarksProps, 'events' | 'room' | '
   </G>
 );
 
-/** What the two lines of the soak are; on a phone only the dashed one is named. */
-const SoakNames = ({ lanes, room, scale, colors }: Pick<MarksProps, 'lanes' | 'room' | 'scale' | 'colors'>) => {
-  const lane = lanes[0];
-  if (!lane?.soakRms || !scale.fold || lane.soak.time.length === 0) return null;
-  const x = scale.fold.right + (room.right - scale.fold.right) * (room.narrow ? 0.97 : 0.62);
-  const at = scale.toTime(x);
-  const own = room.lanes[0]!;
-  const rms = valueAt(lane.soakRms.time, lane.soakRms.value, at);
-  const peak = valueAt(lane.soak.time, lane.soak.value, at);
-  if (rms === null || peak === null) return null;
-  const name = { size: room.fontSize, fill: colors[lane.tone], halo: colors.panel, anchor: 'end' as const };
-  const below = Math.min(own.toY(rms) + 14, own.bottom - 3);
-  return (
-    <G>
-      <PlotText x={x} y={below} {...name}>RMS</PlotText>
-      {room.narrow ? null : <PlotText x={x} y={own.toY(peak) - 6} {...name}>half-period peak</PlotText>}
-    </G>
-  );
-};
-
 /** Everything said on the plot: ratings last, so that nothing lies over them. */
 export const PlotMarks = ({ lanes, room, scale, colors, events, callouts, stopped }: MarksProps) => (
   <G>
     <Events events={events} room={room} colors={colors} />
-    <SoakNames lanes={lanes} room={room} scale={scale} colors={colors} />
     {callouts.map(({ text, tip, x, y, anchor }) => (
       <G key={text}>
-        <Line x1={tip.x + (anchor === 'start' ? 2 : -2)} x2={anchor === 'start' ? x - 3 : x + 3} y1={y - 4} y2={y - 4} stroke={colors.current} strokeWidth={0.8} />
+        {tip ? <Line x1={tip.x + (anchor === 'start' ? 2 : -2)} x2={anchor === 'start' ? x - 3 : x + 3} y1={y - 4} y2={y - 4} stroke={colors.current} strokeWidth={0.8} /> : null}
         <PlotText x={x} y={y} anchor={anchor} size={room.fontSize} fill={colors.current} halo={colors.panel}>{text}</PlotText>
       </G>
     ))}

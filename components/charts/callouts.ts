@@ -1,12 +1,13 @@
 import type { Lane } from './lanes';
 import type { LaneRoom, PlotRoom } from './plot-room';
 import { textWidth } from './PlotText';
+import { valueAt } from './thin-out';
 import { timeText, type TimeScale } from './time-scale';
 
+/** A word on the plot, with the point that it speaks of where a line leads there. */
 export interface Callout {
   text: string;
-  /** Where the peak is. */
-  tip: { x: number; y: number };
+  tip: { x: number; y: number } | null;
   x: number;
   y: number;
   anchor: 'start' | 'end';
@@ -21,8 +22,7 @@ const highest = (values: readonly number[]): number => values.reduce((best, valu
 const median = (values: readonly number[]): number => [...values].sort((a, b) => a - b)[Math.floor(values.length / 2)] ?? 0;
 
 /** The highest current of any corner, in each half where it stands out: a peak too narrow to be read off the band. */
-export const findCallouts = (lane: Lane, own: LaneRoom, room: PlotRoom, scale: TimeScale): Callout[] => {
-  if (lane.key !== 'current') return [];
+const peakCallouts = (lane: Lane, own: LaneRoom, room: PlotRoom, scale: TimeScale): Callout[] => {
   return lane.bands.flatMap(({ half, band }): Callout[] => {
     const at = highest(band.high);
     const value = band.high[at];
@@ -39,3 +39,20 @@ export const findCallouts = (lane: Lane, own: LaneRoom, room: PlotRoom, scale: T
     return [fitting ? { text: fitting, tip, x: tip.x + LEAD, y, anchor: 'start' } : { text: short, tip, x: tip.x - LEAD, y, anchor: 'end' }];
   });
 };
+
+/** What the two lines of the soak are; on a phone only the dashed one is named. */
+const soakNames = (lane: Lane, own: LaneRoom, room: PlotRoom, scale: TimeScale): Callout[] => {
+  if (!lane.soakRms || !scale.fold) return [];
+  const x = room.right - 5;
+  const at = scale.toTime(x);
+  const rms = valueAt(lane.soakRms.time, lane.soakRms.value, at);
+  const peak = valueAt(lane.soak.time, lane.soak.value, at);
+  if (rms === null || peak === null) return [];
+  const name = (text: string, y: number): Callout => ({ text, tip: null, x, y, anchor: 'end' });
+  const below = name('RMS', Math.min(own.toY(rms) + 14, own.bottom - 3));
+  return room.narrow ? [below] : [below, name('half-period peak', own.toY(peak) - 6)];
+};
+
+/** The words on the current's lane. */
+export const findCallouts = (lane: Lane, own: LaneRoom, room: PlotRoom, scale: TimeScale): Callout[] =>
+  lane.key === 'current' ? [...peakCallouts(lane, own, room, scale), ...soakNames(lane, own, room, scale)] : [];

@@ -1,6 +1,7 @@
-import { useEffect, useRef } from 'react';
-import { ScrollView, View, type View as ViewType } from 'react-native';
+import { useEffect, useId, useRef } from 'react';
+import { ScrollView, View } from 'react-native';
 
+import { focusControl } from '@/components/ui/keys';
 import { useLayout, useTheme } from '@/components/ui/theme';
 import { STATUS_COLOR, type ColorName } from '@/components/ui/tokens';
 
@@ -46,7 +47,7 @@ export const PathStrip = ({ blocks, selected, onSelect, stale = false, controls 
   const { colors } = useTheme();
   const { wide, width } = useLayout();
   const scroll = useRef<ScrollView>(null);
-  const tabs = useRef(new Map<string, ViewType | null>());
+  const strip = useId();
   const at = Math.max(0, blocks.findIndex((block) => block.key === selected));
 
   useEffect(() => {
@@ -57,7 +58,7 @@ export const PathStrip = ({ blocks, selected, onSelect, stale = false, controls 
     const block = blocks[Math.min(Math.max(to, 0), blocks.length - 1)];
     if (!block) return;
     onSelect(block.key);
-    tabs.current.get(block.key)?.focus();
+    focusControl(`${strip}${block.key}`);
   };
   const onKey = (key: string): boolean => {
     const target = { ArrowLeft: at - 1, ArrowRight: at + 1, Home: 0, End: blocks.length - 1 }[key];
@@ -69,8 +70,8 @@ export const PathStrip = ({ blocks, selected, onSelect, stale = false, controls 
   const row = (
     <View role="tablist" aria-label="Power-up path" style={{ flexDirection: 'row', flexGrow: 1, height: wide ? HEIGHT.wide : HEIGHT.phone }}>
       {blocks.map((block) => (
-        <StripTab key={block.key} block={block} on={block.key === selected} stale={stale} controls={controls} width={wide ? undefined : BLOCK_WIDTH}
-          onPress={() => onSelect(block.key)} onKey={onKey} keepRef={(tab) => void tabs.current.set(block.key, tab)} />
+        <StripTab key={block.key} id={`${strip}${block.key}`} block={block} on={block.key === selected} stale={stale} controls={controls} width={wide ? undefined : BLOCK_WIDTH}
+          onPress={() => onSelect(block.key)} onKey={onKey} />
       ))}
     </View>
   );

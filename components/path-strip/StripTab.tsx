@@ -1,16 +1,17 @@
-import { Pressable, View, type View as ViewType } from 'react-native';
+import { Pressable, View } from 'react-native';
 
+import { onKeys } from '@/components/ui/keys';
 import { StatusMark } from '@/components/ui/Marks';
 import { BoltIcon } from '@/components/ui/NavIcons';
 import { Text } from '@/components/ui/Text';
 import { useTheme } from '@/components/ui/theme';
 import { STATUS_COLOR } from '@/components/ui/tokens';
-import { onKeys } from '@/components/ui/keys';
 
 import { PathSymbol } from './PathSymbol';
 import type { StripBlock, StripLine, StripMark } from './strip-block';
 
 interface StripTabProps {
+  id: string;
   block: StripBlock;
   on: boolean;
   stale: boolean;
@@ -20,7 +21,6 @@ interface StripTabProps {
   onPress: () => void;
   /** @returns whether the key was meant for the strip */
   onKey: (key: string) => boolean;
-  keepRef: (tab: ViewType | null) => void;
 }
 
 const LINES = 3;
@@ -50,12 +50,12 @@ const Mark = ({ mark, stale }: { mark: StripMark; stale: boolean }) => {
 const spoken = ({ title, lines, mark }: StripBlock) =>
   [title, mark?.text, ...lines.map(({ label, value, unit }) => [label, value, unit].filter(Boolean).join(' '))].filter(Boolean).join(', ');
 
-export const StripTab = ({ block, on, stale, controls, width, onPress, onKey, keepRef }: StripTabProps) => {
+export const StripTab = ({ id, block, on, stale, controls, width, onPress, onKey }: StripTabProps) => {
   const { colors } = useTheme();
   const ground = on ? colors.paper : colors.panel;
   return (
     <Pressable
-      ref={keepRef}
+      id={id}
       role="tab"
       aria-selected={on}
       aria-label={spoken(block)}

@@ -6,6 +6,7 @@ import { StatusMark } from './Marks';
 import { OpenContactIcon } from './NavIcons';
 import { Text } from './Text';
 import { useTheme } from './theme';
+import { RADIUS } from './tokens';
 
 export interface NoticeProps {
   kind: 'offline' | 'conflict' | 'error' | 'info';
@@ -21,7 +22,7 @@ const FRAME = { offline: 'dashed', conflict: 'solid', error: 'solid', info: 'sol
 export const Notice = ({ kind, title, children, action, secondAction }: NoticeProps) => {
   const { colors } = useTheme();
   return (
-    <View role={kind === 'error' ? 'alert' : 'status'} style={{ flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: 12, padding: 12, borderWidth: 1, borderStyle: FRAME[kind], borderColor: kind === 'error' ? colors.fail : colors.ink, borderRadius: RADIUS_NOTICE, backgroundColor: colors.panel }}>
+    <View role={kind === 'error' ? 'alert' : 'status'} style={{ flexDirection: 'row', flexWrap: 'wrap', alignItems: 'center', gap: 12, padding: 12, borderWidth: 1, borderStyle: FRAME[kind], borderColor: kind === 'error' ? colors.fail : colors.ink, borderRadius: RADIUS.button, backgroundColor: colors.panel }}>
       {kind === 'offline' ? <OpenContactIcon /> : null}
       {kind === 'error' ? <StatusMark status="fail" silent /> : null}
       <Text style={{ flex: 1, minWidth: 200 }}>
@@ -33,4 +34,3 @@ export const Notice = ({ kind, title, children, action, secondAction }: NoticePr
     </View>
   );
 };
-const RADIUS_NOTICE = 6;

@@ -19,11 +19,11 @@ export interface QuantityProps {
 
 const MONO_SHARE = 0.9;
 
-/** Pads the fraction with figure spaces, which are as wide as a digit. */
+/** Pads the fraction with spaces, which in the mono face are as wide as a digit. */
 export const alignDecimals = (digits: string, decimals: number): string => {
   const point = digits.indexOf('.');
   const present = point < 0 ? -1 : digits.length - point - 1;
-  return digits + '\u2007'.repeat(Math.max(0, decimals - present));
+  return digits + '\u00a0'.repeat(Math.max(0, decimals - present));
 };
 
 /** One value: digits in the mono face, unit in the text face. */
@@ -32,7 +32,7 @@ export const Quantity = ({ value, dimension, kind, significant, variant = 'body'
   const { number, unit } = quantityText(value, dimension, significant);
   const digits = decimals === undefined ? number : alignDecimals(number, decimals);
   const size = TYPE[variant].fontSize;
-  const tail = [unit === '°' ? '°' : unit && `\u202f${unit}`, kind].filter(Boolean).join(' ');
+  const tail = [unit === '°' ? '°' : unit && `\u00a0${unit}`, kind].filter(Boolean).join(' ');
   return (
     <Text variant={variant} tone={tone} strong={strong}>
       <Text variant={variant} tone={tone} strong={strong} mono style={{ fontSize: size * MONO_SHARE, letterSpacing: size * -0.018 }}>

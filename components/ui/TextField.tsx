@@ -34,6 +34,7 @@ export const TextField = ({ label, hint, error, multiline, hideLabel, inputRef, 
         aria-invalid={Boolean(error)}
         aria-describedby={said ? id : undefined}
         multiline={multiline}
+        placeholderTextColor={colors.quiet}
         style={{
           minHeight: multiline ? 84 : 44,
           paddingHorizontal: 10,

@@ -16,3 +16,8 @@ export const onKeys = (take: (key: string) => boolean): ViewProps => {
   };
   return { onKeyDown } as ViewProps;
 };
+
+/** Moves the keyboard to the control with this id, as arrow keys do inside a group. */
+export const focusControl = (id: string) => {
+  if (Platform.OS === 'web') document.getElementById(id)?.focus();
+};

@@ -1,4 +1,4 @@
-import { createContext, useContext, useEffect, useMemo, useState, useSyncExternalStore, type ReactNode } from 'react';
+import { createContext, useContext, useEffect, useMemo, useSyncExternalStore, type ReactNode } from 'react';
 import { Platform, useColorScheme } from 'react-native';
 
 import { darkPalette, lightPalette, WIDE_FROM, type ColorName, type Palette } from './tokens';
@@ -17,20 +17,35 @@ const isWeb = Platform.OS === 'web';
 const names = Object.keys(lightPalette) as ColorName[];
 const cssPalette = Object.fromEntries(names.map((name) => [name, `var(--${name})`])) as Palette;
 
+let kept: ThemeChoice | null = null;
+const listeners = new Set<() => void>();
+
 const readChoice = (): ThemeChoice => {
+  if (kept) return kept;
   const stored = isWeb && typeof localStorage !== 'undefined' ? localStorage.getItem(STORED_AS) : null;
-  return stored === 'light' || stored === 'dark' ? stored : 'system';
+  kept = stored === 'light' || stored === 'dark' ? stored : 'system';
+  return kept;
 };
 
 const keepChoice = (choice: ThemeChoice) => {
-  if (!isWeb) return;
-  if (choice === 'system') {
-    localStorage.removeItem(STORED_AS);
-    document.documentElement.removeAttribute('data-theme');
-  } else {
-    localStorage.setItem(STORED_AS, choice);
-    document.documentElement.setAttribute('data-theme', choice);
+  kept = choice;
+  if (isWeb) {
+    if (choice === 'system') localStorage.removeItem(STORED_AS);
+    else localStorage.setItem(STORED_AS, choice);
   }
+  listeners.forEach((listener) => listener());
+};
+
+const onChoice = (changed: () => void) => {
+  listeners.add(changed);
+  return () => void listeners.delete(changed);
+};
+
+/** The root element wears the choice, so that the custom properties follow it. */
+const wear = (choice: ThemeChoice) => {
+  if (!isWeb) return;
+  if (choice === 'system') document.documentElement.removeAttribute('data-theme');
+  else document.documentElement.setAttribute('data-theme', choice);
 };
 
 const ThemeContext = createContext<Theme | null>(null);
@@ -38,21 +53,12 @@ const ThemeContext = createContext<Theme | null>(null);
 /** Follows the system's light or dark until the person chooses; the choice is kept in this browser. */
 export const ThemeProvider = ({ children }: { children: ReactNode }) => {
   const system = useColorScheme() === 'dark' ? 'dark' : 'light';
-  const [choice, setState] = useState<ThemeChoice>('system');
-  useEffect(() => {
-    const stored = readChoice();
-    if (stored === 'system') return;
-    setState(stored);
-    keepChoice(stored);
-  }, []);
+  const choice = useSyncExternalStore(onChoice, readChoice, () => 'system' as const);
+  useEffect(() => wear(choice), [choice]);
   const theme = useMemo<Theme>(() => {
     const scheme = choice === 'system' ? system : choice;
     const plain = scheme === 'dark' ? darkPalette : lightPalette;
-    const setChoice = (next: ThemeChoice) => {
-      setState(next);
-      keepChoice(next);
-    };
-    return { colors: isWeb ? cssPalette : plain, scheme, choice, setChoice };
+    return { colors: isWeb ? cssPalette : plain, scheme, choice, setChoice: keepChoice };
   }, [choice, system]);
   return <ThemeContext.Provider value={theme}>{children}</ThemeContext.Provider>;
 };
