@@ -1,13 +1,13 @@
 import { z } from 'zod';
 
-import { DIMENSIONS } from '../quantity/dimension';
+import { numberUnit } from '../quantity/dimension';
 import { FIGURES, type FigureId } from './figure-list';
 
 export { FIGURES, type FigureId, type Figures } from './figure-list';
 
 const entries = Object.entries(FIGURES).map(([id, { label, dimension }]) => [
   id,
-  z.number().nullable().meta({ description: label, unit: DIMENSIONS[dimension].unit }),
+  z.number().nullable().meta({ description: label, unit: numberUnit(dimension) }),
 ]);
 export const figuresSchema = z.object(Object.fromEntries(entries) as Record<FigureId, z.ZodNullable<z.ZodNumber>>);
 

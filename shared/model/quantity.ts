@@ -1,6 +1,6 @@
 import { z } from 'zod';
 
-import { DIMENSIONS, type Dimension, type Qualifier } from '../quantity/dimension';
+import { DIMENSIONS, numberUnit, type Dimension, type Qualifier } from '../quantity/dimension';
 import { formatQuantity } from '../quantity/format';
 import { parseQuantity, parseTolerancedText } from '../quantity/parse';
 
@@ -27,9 +27,15 @@ type Issue = (message: string, path?: string[]) => void;
 
 const missingOr = (input: unknown) => (input === undefined ? 'is missing: ' : '');
 
+const numberIn = (dimension: Dimension) => {
+  if (dimension === 'ratio') return 'a fraction of one';
+  const unit = numberUnit(dimension);
+  return unit ? `a number in ${unit}` : 'a number';
+};
+
 const rawQuantity = (dimension: Dimension) =>
   z.union([z.number(), z.string().max(64)], {
-    error: ({ input }) => `${missingOr(input)}write a number in ${DIMENSIONS[dimension].unit || 'units of one'}, or text such as "${DIMENSIONS[dimension].example}"`,
+    error: ({ input }) => `${missingOr(input)}write ${numberIn(dimension)}, or text such as "${DIMENSIONS[dimension].example}"`,
   });
 
 const issueOn =
@@ -63,7 +69,7 @@ const refuseOutside = (value: number, dimension: Dimension, range: QuantityRange
 
 const metaOf = (dimension: Dimension, range: QuantityRange) => ({
   description: `${range.describe}, from ${formatQuantity(range.min, dimension)} to ${formatQuantity(range.max, dimension)}`,
-  unit: DIMENSIONS[dimension].unit,
+  unit: numberUnit(dimension),
   ...(range.qualifier && { qualifier: range.qualifier }),
 });
 

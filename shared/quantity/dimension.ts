@@ -28,6 +28,9 @@ export const DIMENSIONS = {
 
 export type Dimension = keyof typeof DIMENSIONS;
 
+/** Unit of the number inside and in JSON: a ratio is a fraction there, whatever is shown. */
+export const numberUnit = (dimension: Dimension): string => (dimension === 'ratio' ? '1' : DIMENSIONS[dimension].unit);
+
 export const ZERO_CELSIUS = 273.15;
 
 /** How a current or voltage is meant; a qualifier that contradicts the field is refused. */
