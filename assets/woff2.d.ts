@@ -1,5 +1,5 @@
 /** Metro turns an imported face into the number of its asset. */
 declare module '*.woff2' {
   const asset: number;
-  export default asset;
+  export = asset;
 }

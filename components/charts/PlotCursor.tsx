@@ -10,7 +10,7 @@ import { laneObstacles, readLanes, sayReadings } from './cursor-reading';
 import type { Lane } from './lanes';
 import type { PlacedEvent } from './place-events';
 import { placeTag } from './place-tag';
-import type { PlotRoom } from './plot-room';
+import { headWords, type PlotRoom } from './plot-room';
 import { PlotText, textWidth } from './PlotText';
 import { timeText, type TimeScale } from './time-scale';
 
@@ -39,15 +39,27 @@ const keyTarget = (key: string, x: number, { left, right }: PlotRoom, events: re
   return { ArrowRight: x + KEY_STEP, ArrowUp: x + KEY_STEP, ArrowLeft: x - KEY_STEP, ArrowDown: x - KEY_STEP, Home: left, End: right, PageUp: Math.min(right, ...ahead), PageDown: Math.max(left, ...behind) }[key];
 };
 
+/** The ground behind the time: it takes a word of the head away as a whole, never half of it. */
+const coverOf = ([from, to]: [number, number], room: PlotRoom, scale: TimeScale): [number, number] =>
+  headWords(room, scale).reduce<[number, number]>(
+    (cover, { text, x, anchor }) => {
+      const width = textWidth(text, room.fontSize) + 6;
+      const [start, end] = anchor === 'start' ? [x - 1, x + width] : [x - width, x + 1];
+      return start < to && from < end ? [Math.min(cover[0], start), Math.max(cover[1], end)] : cover;
+    },
+    [from, to],
+  );
+
 /** Cursor line with its time, and in each lane a ring on the trace and a tag with the value. */
 const Drawn = ({ x, lanes, room, scale, colors, obstacles }: Omit<PlotCursorProps, 'events' | 'callouts'> & { x: number; obstacles: ReturnType<typeof laneObstacles>[] }) => {
   const at = scale.toTime(x);
   const time = timeText(at);
   const half = textWidth(time, room.fontSize, true) / 2 + 3;
   const timeX = Math.min(Math.max(x, room.left + half), room.right - half);
+  const cover = coverOf([timeX - half, timeX + half], room, scale);
   return (
     <G>
-      <Rect x={timeX - half} y={1} width={half * 2} height={15} fill={colors.paper} />
+      <Rect x={cover[0]} y={1} width={cover[1] - cover[0]} height={15} fill={colors.paper} />
       <PlotText x={timeX} y={13} anchor="middle" size={room.fontSize} mono strong fill={colors.ink}>{time}</PlotText>
       <Line x1={x} x2={x} y1={room.top} y2={room.bottom} stroke={colors.ink} strokeWidth={1.2} />
       <Path d={`M${x - 5} ${room.top}h10l-5 6z`} fill={colors.ink} />

@@ -4,7 +4,7 @@ import { FAMILY } from '@/components/ui/Text';
 import type { Palette } from '@/components/ui/tokens';
 
 import type { Lane } from './lanes';
-import type { PlotRoom } from './plot-room';
+import { headWords, type PlotRoom } from './plot-room';
 import { PlotText, textWidth } from './PlotText';
 import type { TimeScale } from './time-scale';
 
@@ -100,7 +100,6 @@ export const PlotFrame = ({ lanes, room, scale, colors }: FrameProps) => (
         </PlotText>
       );
     })}
-    {scale.fold ? <PlotText x={scale.fold.left - 4} y={13} anchor="end" size={room.fontSize} fill={colors.quiet}>waveform, linear</PlotText> : null}
-    {scale.fold ? <PlotText x={scale.fold.right + 4} y={13} size={room.fontSize} fill={colors.quiet}>{room.narrow ? 'soak, log' : 'soak, logarithmic'}</PlotText> : null}
+    {headWords(room, scale).map(({ text, x, anchor }) => <PlotText key={text} x={x} y={13} anchor={anchor} size={room.fontSize} fill={colors.quiet}>{text}</PlotText>)}
   </G>
 );

@@ -66,7 +66,7 @@ export const SplitTimePlot = (props: SplitTimePlotProps) => {
         <PlotMarks {...shared} events={events} callouts={stale ? [] : callouts} stopped={stopped} />
       </Svg>
       {stale ? (
-        <View style={{ position: 'absolute', left: frame.room.left + 8, top: (frame.room.lanes[0]?.bottom ?? 40) - 32 }}><Plate text="Before your last edit" /></View>
+        <View style={{ position: 'absolute', left: frame.room.left + 8, top: frame.room.top + 10 }}><Plate text="Before your last edit" /></View>
       ) : (
         <PlotCursor {...shared} events={events} callouts={callouts} />
       )}

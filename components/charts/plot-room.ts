@@ -1,4 +1,5 @@
 import type { Lane } from './lanes';
+import type { TimeScale } from './time-scale';
 
 /** What follows from the width alone. */
 export interface PlotWidth {
@@ -55,3 +56,12 @@ export const divideHeight = (across: PlotWidth, lanes: readonly Lane[], height: 
   });
   return { ...across, height, lanes: rooms, top: HEAD - RULE_OFF, bottom: bottom + RULE_OFF };
 };
+
+/** What the two halves of the time axis are, over their inner edges. */
+export const headWords = ({ narrow }: PlotWidth, { fold }: TimeScale): { text: string; x: number; anchor: 'start' | 'end' }[] =>
+  fold
+    ? [
+        { text: 'waveform, linear', x: fold.left - 4, anchor: 'end' },
+        { text: narrow ? 'soak, log' : 'soak, logarithmic', x: fold.right + 4, anchor: 'start' },
+      ]
+    : [];

@@ -42,6 +42,13 @@ export const indexBefore = (rising: readonly number[], at: number): number => {
   return low;
 };
 
+/** Index of the entry nearest to `at` in a rising list. */
+export const indexNearest = (rising: readonly number[], at: number): number => {
+  const before = indexBefore(rising, at);
+  const next = rising[before + 1];
+  return next !== undefined && next - at < at - rising[before]! ? before + 1 : before;
+};
+
 /** Linear between the two neighbours, the end value beyond the ends; null of an empty series. */
 export const valueAt = (rising: readonly number[], values: readonly number[], at: number): number | null => {
   const index = indexBefore(rising, at);

@@ -1,7 +1,7 @@
 import type { RunEvent, Traces } from '@/shared/model/result';
 
 import { EVENT_WORD } from './place-events';
-import { indexBefore } from './thin-out';
+import { indexNearest } from './thin-out';
 
 /** One line of the table behind the plot: SI, at a point that was computed, never between two. */
 export interface TraceRow {
@@ -15,7 +15,7 @@ export interface TraceRow {
   temperature: number | null;
   resistance: number | null;
   energy: number | null;
-  /** What happens in the step up to the next row, or why the row is here. */
+  /** What happens here, or why the row is here. */
   remark: string;
 }
 
@@ -40,9 +40,9 @@ const pick = (time: readonly number[], current: readonly number[], wanted: reado
   if (first === undefined || last === undefined) return { indexes: [], remarks: new Map() };
   const remarks = new Map<number, string>();
   const say = (index: number, word: string) => remarks.set(index, [remarks.get(index), word].filter(Boolean).join(', '));
-  events.filter(({ at }) => at >= first && at <= last).forEach(({ at, kind }) => say(indexBefore(time, at), EVENT_WORD[kind]));
+  events.filter(({ at }) => at >= first && at <= last).forEach(({ at, kind }) => say(indexNearest(time, at), EVENT_WORD[kind]));
   say(peakIndex(current), peakWord);
-  const indexes = [...new Set([...wanted.map((at) => indexBefore(time, at)), ...remarks.keys()])].sort((a, b) => a - b);
+  const indexes = [...new Set([...wanted.map((at) => indexNearest(time, at)), ...remarks.keys()])].sort((a, b) => a - b);
   return { indexes, remarks };
 };
 

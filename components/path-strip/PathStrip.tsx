@@ -1,7 +1,7 @@
 import { useEffect, useId, useRef } from 'react';
 import { ScrollView, View } from 'react-native';
 
-import { focusControl } from '@/components/ui/keys';
+import { focusControl, onKeys } from '@/components/ui/keys';
 import { useLayout, useTheme } from '@/components/ui/theme';
 import { STATUS_COLOR, type ColorName } from '@/components/ui/tokens';
 
@@ -68,10 +68,10 @@ export const PathStrip = ({ blocks, selected, onSelect, stale = false, controls 
   };
 
   const row = (
-    <View role="tablist" aria-label="Power-up path" style={{ flexDirection: 'row', flexGrow: 1, height: wide ? HEIGHT.wide : HEIGHT.phone }}>
+    <View role="tablist" aria-label="Power-up path" {...onKeys(onKey)} style={{ flexDirection: 'row', flexGrow: 1, height: wide ? HEIGHT.wide : HEIGHT.phone }}>
       {blocks.map((block) => (
         <StripTab key={block.key} id={`${strip}${block.key}`} block={block} on={block.key === selected} stale={stale} controls={controls} width={wide ? undefined : BLOCK_WIDTH}
-          onPress={() => onSelect(block.key)} onKey={onKey} />
+          onPress={() => onSelect(block.key)} />
       ))}
     </View>
   );

@@ -1,6 +1,5 @@
 import { Pressable, View } from 'react-native';
 
-import { onKeys } from '@/components/ui/keys';
 import { StatusMark } from '@/components/ui/Marks';
 import { BoltIcon } from '@/components/ui/NavIcons';
 import { Text } from '@/components/ui/Text';
@@ -19,8 +18,6 @@ interface StripTabProps {
   /** px; shares the strip equally without. */
   width?: number;
   onPress: () => void;
-  /** @returns whether the key was meant for the strip */
-  onKey: (key: string) => boolean;
 }
 
 const LINES = 3;
@@ -50,7 +47,7 @@ const Mark = ({ mark, stale }: { mark: StripMark; stale: boolean }) => {
 const spoken = ({ title, lines, mark }: StripBlock) =>
   [title, mark?.text, ...lines.map(({ label, value, unit }) => [label, value, unit].filter(Boolean).join(' '))].filter(Boolean).join(', ');
 
-export const StripTab = ({ id, block, on, stale, controls, width, onPress, onKey }: StripTabProps) => {
+export const StripTab = ({ id, block, on, stale, controls, width, onPress }: StripTabProps) => {
   const { colors } = useTheme();
   const ground = on ? colors.paper : colors.panel;
   return (
@@ -62,7 +59,6 @@ export const StripTab = ({ id, block, on, stale, controls, width, onPress, onKey
       aria-controls={controls}
       tabIndex={on ? 0 : -1}
       onPress={onPress}
-      {...onKeys(onKey)}
       style={{ width, flexGrow: width ? 0 : 1, flexBasis: width ?? 0, minWidth: 0, backgroundColor: ground, outlineOffset: -3 }}
     >
       <PathSymbol name={block.symbol} stroke={colors.ink} ground={ground} />

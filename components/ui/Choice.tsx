@@ -35,12 +35,12 @@ export const Choice = <Value extends string>({ label, options, value, onChange, 
   return (
     <View style={{ gap: 4 }}>
       {hideLabel ? null : <Text variant="label" aria-hidden>{label}</Text>}
-      <View role="radiogroup" aria-label={label} style={{ flexDirection: 'row', flexWrap: 'wrap' }}>
+      <View role="radiogroup" aria-label={label} {...onKeys(onKey)} style={{ flexDirection: 'row', flexWrap: 'wrap' }}>
         {options.map((option, index) => {
           const on = option.value === value;
           return (
             <Pressable key={option.value} id={`${group}${option.value}`} role="radio" aria-checked={on} aria-label={option.label} aria-disabled={disabled} disabled={disabled}
-              tabIndex={on || (at < 0 && index === 0) ? 0 : -1} onPress={() => onChange(option.value)} {...onKeys(onKey)}
+              tabIndex={on || (at < 0 && index === 0) ? 0 : -1} onPress={() => onChange(option.value)}
               style={{ minHeight: finePointer ? TARGET.pointer : TARGET.finger, minWidth: 44, paddingHorizontal: 12, justifyContent: 'center', alignItems: 'center', marginRight: -1, borderWidth: 1, borderColor: on ? colors.ink : colors.rule2, borderRadius: RADIUS.window, backgroundColor: on ? colors.ink : colors.panel }}>
               <Text variant="label" strong={on} tone={on ? 'onFilled' : disabled ? 'quiet' : 'ink'}>{option.label}</Text>
             </Pressable>

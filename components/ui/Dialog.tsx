@@ -1,5 +1,5 @@
 import type { ReactNode } from 'react';
-import { Modal, Pressable, ScrollView, View } from 'react-native';
+import { Modal, ScrollView, View } from 'react-native';
 
 import { Text } from './Text';
 import { useTheme } from './theme';
@@ -21,8 +21,8 @@ export const Dialog = ({ title, open, onClose, children, actions, maxWidth = 560
   return (
     <Modal visible={open} transparent animationType="none" onRequestClose={onClose}>
       <View style={{ flex: 1, justifyContent: 'center', alignItems: 'center', padding: 16 }}>
-        <Pressable aria-hidden tabIndex={-1} onPress={onClose} style={{ position: 'absolute', inset: 0, backgroundColor: colors.ink, opacity: 0.45 }} />
-        <View role="dialog" aria-modal aria-label={title} style={{ width: '100%', maxWidth, maxHeight: '100%', backgroundColor: colors.paper, borderTopWidth: 4, borderTopColor: colors.ink }}>
+        <View aria-hidden onPointerUp={onClose} style={{ position: 'absolute', inset: 0, backgroundColor: colors.paper, opacity: 0.8 }} />
+        <View role="dialog" aria-modal aria-label={title} style={{ width: '100%', maxWidth, maxHeight: '100%', backgroundColor: colors.paper, borderWidth: 1, borderColor: colors.rule2, borderTopWidth: 4, borderTopColor: colors.ink }}>
           <View style={{ paddingHorizontal: 16, paddingTop: 14, paddingBottom: 8 }}>
             <Text variant="title" strong heading={2}>{title}</Text>
           </View>
