@@ -4,6 +4,7 @@ import type { Scenario } from '../../shared/model/scenario';
 import { ENGINE_VERSION } from '../engine-version';
 import { studyBypass } from './bypass';
 import { studyChargingHeat } from './charging-heat';
+import { studySecondPeaks } from './closing-instant';
 import { studyColdStart } from './cold-start';
 import { envelopeOf } from './envelope';
 import { cornerOf } from './factors';
@@ -31,10 +32,17 @@ const distinct = (situations: readonly (Situation | null)[]): Situation[] => {
   return [...seen.values()];
 };
 
-const envelopeFor = (trials: Trials, nominal: Run, situations: readonly Situation[]) => {
+/** Switch-on angles whose first cycles are added at the corner of the highest peak: the contact of a switch knows none. */
+const ANGLES = [0, 1, 2, 3].map((quarter) => (quarter * Math.PI) / 4);
+
+const envelopeFor = (trials: Trials, nominal: Run, situations: readonly Situation[], highest: Situation) => {
   if (trials.ranges.length === 0) return { envelope: null, corners: [] };
   const corners = new Map(situations.map(({ levels }) => [keyOf(levels), cornerOf(trials.ranges, levels)]));
-  const traces = situations.map((one) => trials.traced(one, AS_DESCRIBED).run.traces);
+  const searched = givenPhase(trials.scenario) === null;
+  const traces = [
+    ...situations.map((one) => trials.traced(one, AS_DESCRIBED).run.traces),
+    ...(searched ? ANGLES.map((phase) => trials.opening({ levels: highest.levels, phase }).traces) : []),
+  ];
   return { envelope: envelopeOf(nominal.traces, traces, trials.scenario.source.kind === 'ac'), corners: [...corners.values()] };
 };
 
@@ -43,22 +51,24 @@ export const assess = (scenario: Scenario, { envelope: wanted = true }: AssessOp
   const trials = trialsOf(scenario);
   const peak = studyPeakCurrent(trials);
   const { studied: hotRestart, restart } = studyHotRestart(trials);
+  const contacts = studySecondPeaks(trials);
   const studied = [
     peak,
     ...studyDiodes(trials),
-    ...studyFusePulse(trials),
+    ...studyFusePulse(trials, contacts),
     ...studyBreakingCapacity(trials),
     ...studyChargingHeat(trials),
     ...studySteady(trials),
     ...studyColdStart(trials),
     ...hotRestart,
     ...studyRestartEnergy(trials),
+    ...contacts.map(({ studied: one }) => one),
     ...studyBypass(trials),
     ...studyPtc(trials),
   ];
   const checks = inOrder(setAsideIn(studied.map(({ check }) => check), scenario.setAside));
   const { run } = trials.traced(peak.found.nominal, AS_DESCRIBED);
-  const band = wanted ? envelopeFor(trials, run, distinct(studied.map(({ situation }) => situation))) : { envelope: null, corners: [] };
+  const band = wanted ? envelopeFor(trials, run, distinct(studied.map(({ situation }) => situation)), peak.found.worst) : { envelope: null, corners: [] };
   return { engineVersion: ENGINE_VERSION, verdict: verdictOf(checks), checks, run, restart, ...band };
 };
 

@@ -26,6 +26,8 @@ export const emptyBand = (length: number): Band => ({ low: Array<number>(length)
 
 /** Widens the band by one series on the axis; a sample between two points of the axis counts for both, so that no peak is lost. */
 export const widen = (band: Band, axis: readonly number[], series: Series): void => {
+  // A run that is followed for the first cycles only says nothing about later ones.
+  const end = (series.time[series.time.length - 1] ?? -Infinity) * (1 + 1e-9);
   let after = 0;
   for (let index = 0; index < axis.length; index += 1) {
     const at = axis[index]!;
@@ -35,6 +37,6 @@ export const widen = (band: Band, axis: readonly number[], series: Series): void
       if (index > 0 && series.time[after]! > axis[index - 1]!) include(band, index, value);
       after += 1;
     }
-    if (series.time.length > 0) include(band, index, valueAt(series, at, after));
+    if (at <= end) include(band, index, valueAt(series, at, after));
   }
 };

@@ -3,7 +3,6 @@ import { bypassNeverClosesCheck } from '../checks/bypass-never-closes';
 import { bypassWeldedCheck } from '../checks/bypass-welded';
 import { surgeRating } from '../checks/diode-surge';
 import type { Element } from '../../shared/model/limiter';
-import { studySecondPeak } from './closing-instant';
 import { ambientAt } from './resolve-path';
 import { searchSteady } from './steady';
 import { findingOf, orNever, searchWorst, type Studied } from './studied';
@@ -64,10 +63,10 @@ const studyWelded = (trials: Trials, index: number): Studied => {
   return { check: bypassWeldedCheck(one, cautionBelow), situation: null };
 };
 
-/** Closing of each contact, and what its two failures do. */
+/** Sequence of each contact with the load, and what its two failures do. */
 export const studyBypass = (trials: Trials): Studied[] =>
   trials.scenario.limiter.flatMap((element, index) => {
     if (!element.bypass) return [];
-    const closing = element.bypass.behaviour === 'works' ? [studySecondPeak(trials, index, element.bypass), ...studyCoincidence(trials, index)] : [];
-    return [...closing, studyNeverCloses(trials, index, element), studyWelded(trials, index)];
+    const sequence = element.bypass.behaviour === 'works' ? studyCoincidence(trials, index) : [];
+    return [...sequence, studyNeverCloses(trials, index, element), studyWelded(trials, index)];
   });

@@ -59,17 +59,25 @@ export interface Trials {
   whole(situation: Situation, variant?: Variant): PowerUp;
   /** As `whole`, with traces. */
   traced(situation: Situation, variant?: Variant): PowerUp;
+  /** The first cycles, with traces. */
+  opening(situation: Situation, variant?: Variant): Run;
   /** From another state than cold; not kept. */
   from(situation: Situation, start: StartState, stopAt: 'first-pulse' | 'charged', variant?: Variant): Run;
 }
 
+/** Longer than any pulse takes to begin and end, s. */
 const QUICK = 0.5;
+/** Some cycles at any line frequency, s. */
+const OPENING = 0.1;
 
 export const trialsOf = (scenario: Scenario): Trials => {
   const kept = new Map<string, PowerUp>();
   const path = (levels: Levels, phase: number, variant = UNDISTURBED): PowerPath => variant.change(resolvePath(scenario, levels, phase));
+  const disturbed = scenario.fault !== undefined || scenario.source.programme.length > 0;
+  // Without a fault and without interruptions the three ways to take the path are one.
+  const nameOf = (variant: Variant): string => (!disturbed && (variant === AS_DESCRIBED || variant === FAULTED) ? UNDISTURBED.name : variant.name);
   const once = (question: string, { levels, phase }: Situation, variant: Variant, options: RunOptions): PowerUp => {
-    const key = `${question}|${variant.name}|${keyOf(levels)}|${phase.toFixed(5)}`;
+    const key = `${question}|${nameOf(variant)}|${keyOf(levels)}|${phase.toFixed(5)}`;
     const known = kept.get(key);
     if (known) return known;
     const result = powerUp(path(levels, phase, variant), options);
@@ -90,6 +98,7 @@ export const trialsOf = (scenario: Scenario): Trials => {
     },
     whole: (situation, variant = UNDISTURBED) => once('whole', situation, variant, { duration, traces: false }),
     traced: (situation, variant = UNDISTURBED) => once('traced', situation, variant, { duration }),
+    opening: (situation, variant = UNDISTURBED) => once('opening', situation, variant, { duration: Math.min(duration, OPENING) }).run,
     from: ({ levels, phase }, start, stopAt, variant = UNDISTURBED) =>
       powerUp(path(levels, phase, variant), { duration: Math.min(duration, QUICK), stopAt, traces: false, start }).run,
   };

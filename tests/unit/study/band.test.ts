@@ -15,9 +15,10 @@ describe('a band over an axis', () => {
     expect(band.low).toEqual([0, 0, 0]);
   });
 
-  it('holds a series at its last value where it ends before the axis', () => {
+  it('says nothing beyond the end of a series', () => {
     const band = emptyBand(2);
-    widen(band, [0, 5], { time: [0, 1], value: [2, 3] });
-    expect(band).toEqual({ low: [2, 3], high: [3, 3] });
+    widen(band, [0, 5], { time: [0, 5], value: [2, 2] });
+    widen(band, [0, 5], { time: [0, 1], value: [1, 9] });
+    expect(band).toEqual({ low: [1, 2], high: [9, 9] });
   });
 });
