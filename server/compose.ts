@@ -7,7 +7,7 @@ import type { Simulated } from '../shared/contracts/simulation';
 import type { Clock } from './clock';
 import { HealthService } from './health/health-service';
 import { createApp } from './http/app';
-import { readClientFiles } from './http/client-files';
+import { type ClientFiles, readClientFiles } from './http/client-files';
 import { PartService } from './parts/part-service';
 import { ScenarioService } from './scenarios/scenario-service';
 import { VerdictFiller } from './scenarios/verdict-filler';
@@ -32,6 +32,7 @@ export interface Settings {
 
 export interface Composed {
   app: Express;
+  client: ClientFiles | null;
   passwords: Passwords;
   simulations: SimulationService;
   verdicts: VerdictFiller;
@@ -67,5 +68,5 @@ export const compose = ({ database, sessionSecret, staticDir, log, clock = () =>
   const close = async () => {
     await Promise.all([verdicts.close(), simulations.close(), passwords.close()]);
   };
-  return { app: createApp({ services, log, client }), passwords, simulations, verdicts, close };
+  return { app: createApp({ services, log, client }), client, passwords, simulations, verdicts, close };
 };

@@ -1,14 +1,16 @@
 import type { Server } from 'node:http';
 import { setTimeout as wait } from 'node:timers/promises';
-import pino from 'pino';
+import pino, { type Logger } from 'pino';
 import type { DataSource } from 'typeorm';
 
+import { ENGINE_VERSION } from '../simulation';
 import { type Composed, compose } from './compose';
 import { type Config, ConfigError, readConfig } from './config';
 import { isDatabaseUnavailable } from './database/availability';
 import { createDataSource } from './database/data-source';
 import { migrate } from './database/migrate';
 import { seedDemo } from './demo/seed';
+import { compressClient } from './http/compress-client';
 
 const CONNECT_ATTEMPTS = 30;
 /** Milliseconds that requests under way get to end. */
@@ -39,6 +41,26 @@ const closeServer = async (server: Server): Promise<void> => {
   server.closeAllConnections();
 };
 
+/** What makes the first minutes better but must not keep anyone waiting. */
+const prepareBehindTheScenes = async ({ simulations, verdicts, client }: Composed): Promise<void> => {
+  await simulations.warmUp();
+  await verdicts.discardOlderThan(ENGINE_VERSION);
+  verdicts.wake();
+  if (client) await compressClient(client);
+};
+
+const stopOnSignal = (log: Logger, stop: () => Promise<void>): void => {
+  let stopping = false;
+  const onSignal = async (signal: string): Promise<void> => {
+    if (stopping) return;
+    stopping = true;
+    log.info({ signal }, 'stopping');
+    await stop();
+    process.exit(0);
+  };
+  for (const signal of ['SIGINT', 'SIGTERM'] as const) process.on(signal, () => void onSignal(signal));
+};
+
 const start = async (config: Config): Promise<void> => {
   const log = pino({ level: config.logLevel }, pino.destination(2));
   const database = createDataSource(config.databaseUrl, log);
@@ -46,23 +68,14 @@ const start = async (config: Config): Promise<void> => {
   await migrate(database);
   const composed = compose({ database, sessionSecret: config.sessionSecret, staticDir: config.staticDir, log });
   if (config.seedDemo) await seedDemo(database, composed.passwords);
-  const { engineVersion } = await composed.simulations.warmUp();
   const server = await listen(composed, config);
-  await composed.verdicts.discardOlderThan(engineVersion);
-  composed.verdicts.wake();
-
-  let stopping = false;
-  const stop = async (signal: string): Promise<void> => {
-    if (stopping) return;
-    stopping = true;
-    log.info({ signal }, 'stopping');
+  stopOnSignal(log, async () => {
     await closeServer(server);
     await composed.close();
     await database.destroy();
-    process.exit(0);
-  };
-  for (const signal of ['SIGINT', 'SIGTERM'] as const) process.on(signal, () => void stop(signal));
+  });
   process.stdout.write(`Tidegate is ready on http://${config.host}:${config.port}\n`);
+  prepareBehindTheScenes(composed).catch((error: unknown) => log.error({ err: error }, 'preparing failed'));
 };
 
 const explain = (error: unknown): string => {

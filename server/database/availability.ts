@@ -4,11 +4,22 @@ const UNREACHABLE_CODES = new Set(['ECONNREFUSED', 'ECONNRESET', 'EPIPE', 'ETIME
 /** pg tells these by their words alone. */
 const BROKEN_CONNECTION = /Connection terminated|timeout exceeded when trying to connect|Client has encountered a connection error|not queryable/i;
 
+interface ErrorShape {
+  code?: unknown;
+  message?: unknown;
+  /** Several addresses were tried. */
+  errors?: unknown;
+  /** What TypeORM wraps. */
+  driverError?: unknown;
+}
+
+const meansUnavailable = ({ code, message }: ErrorShape): boolean =>
+  (typeof code === 'string' && (UNAVAILABLE_STATES.test(code) || UNREACHABLE_CODES.has(code))) || (typeof message === 'string' && BROKEN_CONNECTION.test(message));
+
 /** Whether an error means that the database cannot be reached now, rather than that a statement was wrong. */
 export const isDatabaseUnavailable = (error: unknown): boolean => {
-  if (!(error instanceof Error)) return false;
-  const code = 'code' in error && typeof error.code === 'string' ? error.code : '';
-  if (UNAVAILABLE_STATES.test(code) || UNREACHABLE_CODES.has(code) || BROKEN_CONNECTION.test(error.message)) return true;
-  if (error instanceof AggregateError) return error.errors.some(isDatabaseUnavailable);
-  return 'driverError' in error && error.driverError !== error && isDatabaseUnavailable(error.driverError);
+  if (typeof error !== 'object' || error === null) return false;
+  const { errors, driverError }: ErrorShape = error;
+  if (meansUnavailable(error) || (Array.isArray(errors) && errors.some(isDatabaseUnavailable))) return true;
+  return driverError !== error && isDatabaseUnavailable(driverError);
 };

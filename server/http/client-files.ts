@@ -6,7 +6,7 @@ import { join, relative, sep } from 'node:path';
 export interface ClientFiles {
   root: string;
   /** Paths below the root, with forward slashes. */
-  files: ReadonlySet<string>;
+  files: Set<string>;
   /** Of every inline script in its pages, as the content policy wants them. */
   scriptHashes: readonly string[];
 }
@@ -23,6 +23,9 @@ export const readClientFiles = (root: string): ClientFiles => {
   const scriptHashes = [...new Set(pages.flatMap((page) => inlineScriptHashes(readFileSync(join(root, page), 'utf8'))))];
   return { root, files, scriptHashes };
 };
+
+/** The export names these by their content, so a name never gets other bytes. */
+export const isNamedByContent = (file: string): boolean => /^(_expo\/static|assets)\//.test(file);
 
 const isParameter = (segment: string) => segment.startsWith('[') && segment.endsWith(']');
 

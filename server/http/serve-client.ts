@@ -1,15 +1,9 @@
 import type { RequestHandler, Response } from 'express';
 
-import { type ClientFiles, resolveClientFile } from './client-files';
+import { COMPRESSED_SUFFIX } from './compress-client';
+import { type ClientFiles, isNamedByContent, resolveClientFile } from './client-files';
 
-/** The export names these by their content, so a name never gets other bytes. */
-const HASHED = /^(_expo\/static|assets)\//;
 const YEAR = 'public, max-age=31536000, immutable';
-
-const encodings = [
-  { name: 'br', suffix: '.br' },
-  { name: 'gzip', suffix: '.gz' },
-] as const;
 
 const sendFile = (response: Response, root: string, file: string): Promise<void> =>
   new Promise((resolve, reject) => {
@@ -27,9 +21,10 @@ export const serveClient =
       return;
     }
     const { file, status } = found;
-    response.status(status).set('Cache-Control', HASHED.test(file) ? YEAR : 'no-cache').type(file.slice(file.lastIndexOf('.')));
-    const encoding = encodings.find(({ name, suffix }) => client.files.has(file + suffix) && request.acceptsEncodings(name));
+    response.status(status).set('Cache-Control', isNamedByContent(file) ? YEAR : 'no-cache').type(file.slice(file.lastIndexOf('.')));
+    const compressed = file + COMPRESSED_SUFFIX;
+    const sent = client.files.has(compressed) && request.acceptsEncodings('br') ? compressed : file;
     response.vary('Accept-Encoding');
-    if (encoding) response.set('Content-Encoding', encoding.name);
-    await sendFile(response, client.root, file + (encoding?.suffix ?? ''));
+    if (sent === compressed) response.set('Content-Encoding', 'br');
+    await sendFile(response, client.root, sent);
   };

@@ -1,5 +1,5 @@
 import type { DataSource } from 'typeorm';
-import { z } from 'zod';
+import type { z } from 'zod';
 
 import { storableText } from '../../shared/contracts/text';
 import type { partListQuerySchema, partListSchema, PartRecord } from '../../shared/contracts/part';

@@ -5,7 +5,7 @@ import { WorkerPool } from '../worker-pool';
 export type PasswordTask = { kind: 'hash'; password: string } | { kind: 'compare'; password: string; hash: string };
 
 /** Hash of a password that nobody has, so that an unknown account takes as long as a known one. */
-const NOBODY = '$2b$11$PN/WKDDWvvtCcURl3tMVYe9RZPJQ0vo0wIcCwOdataMBffRhRuShy';
+export const UNKNOWN_ACCOUNT = '$2b$11$PN/WKDDWvvtCcURl3tMVYe9RZPJQ0vo0wIcCwOdataMBffRhRuShy';
 
 /** bcrypt in a thread, so that no request waits for another's sign-in. */
 export class Passwords {
@@ -21,7 +21,7 @@ export class Passwords {
 
   /** @param hash null where the account is unknown; the answer is false then, at the same pace */
   async matches(password: string, hash: string | null): Promise<boolean> {
-    const same = await this.pool.run({ kind: 'compare', password, hash: hash ?? NOBODY });
+    const same = await this.pool.run({ kind: 'compare', password, hash: hash ?? UNKNOWN_ACCOUNT });
     return hash !== null && same === true;
   }
 

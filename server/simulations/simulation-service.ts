@@ -16,9 +16,8 @@ export class SimulationService {
   constructor(private readonly pool: SimulationPool) {}
 
   /** Computes once in every thread, so that the first person does not wait for the code to be loaded and compiled. */
-  async warmUp(): Promise<{ engineVersion: string }> {
-    const runs = await Promise.all(Array.from({ length: this.pool.threads }, () => this.assess(WARM_UP_SCENARIO)));
-    return { engineVersion: runs[0]!.assessment.engineVersion };
+  async warmUp(): Promise<void> {
+    await Promise.all(Array.from({ length: this.pool.threads }, () => this.assess(WARM_UP_SCENARIO)));
   }
 
   /**

@@ -38,10 +38,10 @@ export class ApiServer {
     private readonly end: () => Promise<void>,
   ) {}
 
-  static async start(settings: Partial<Settings> & { databaseUrl?: (direct: string) => string } = {}): Promise<ApiServer> {
+  static async start({ throughCable, ...settings }: Partial<Settings> & { throughCable?: (direct: string) => Promise<string> } = {}): Promise<ApiServer> {
     const created = await createTestDatabase();
     const log = pino({ level: 'silent' });
-    const database = createDataSource(settings.databaseUrl?.(created.url) ?? created.url, log);
+    const database = createDataSource((await throughCable?.(created.url)) ?? created.url, log);
     await database.initialize();
     const time = { offset: 0 };
     const clock = () => new Date(Date.now() + time.offset);
