@@ -36,9 +36,22 @@ const parse = express.json({
 /** Neither fits into PostgreSQL: U+0000, and half of a surrogate pair. */
 const UNSTORABLE = /\0|\p{Surrogate}/u;
 
-const holdsUnstorable = (value: unknown): boolean => {
-  if (typeof value === 'string') return UNSTORABLE.test(value);
-  return typeof value === 'object' && value !== null && Object.values(value).some(holdsUnstorable);
+/** @returns the path of the first text that cannot be stored, or null */
+const findUnstorable = (value: unknown, path = ''): string | null => {
+  if (typeof value === 'string') return UNSTORABLE.test(value) ? path : null;
+  if (typeof value !== 'object' || value === null) return null;
+  for (const [key, inner] of Object.entries(value)) {
+    const found = UNSTORABLE.test(key) ? path : findUnstorable(inner, path ? `${path}.${key}` : key);
+    if (found !== null) return found;
+  }
+  return null;
+};
+
+const refuseUnstorable = (body: unknown): void => {
+  const path = findUnstorable(body);
+  if (path === null) return;
+  const message = 'holds the character U+0000 or half of a surrogate pair';
+  throw new ProblemError('invalid-input', `${path || 'The body'}: ${message}`, { issues: [{ path, message }] });
 };
 
 /** Reads the body into `request.body`, only once the caller is known to be allowed to send one. */
@@ -46,5 +59,5 @@ export const readJsonBody = async (request: Request, response: Response): Promis
   if (request.headers['content-type'] !== undefined && !request.is('application/json'))
     throw new ProblemError('unsupported-media', 'Send application/json.');
   await new Promise<void>((resolve, reject) => parse(request, response, (error?: unknown) => (error ? reject(error) : resolve())));
-  if (holdsUnstorable(request.body)) throw new ProblemError('malformed-body', 'The body holds the character U+0000 or half of a surrogate pair.');
+  refuseUnstorable(request.body);
 };

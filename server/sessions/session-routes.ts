@@ -17,8 +17,8 @@ export const sessionRoutes: readonly Route[] = [
     answer: { status: 201, description: 'Signed in', schema: sessionSchema },
     problems: ['wrong-credentials', 'too-many-attempts'],
     handle: async ({ body, request, response }, services) => {
-      const before = await services.sessions.resume(readSessionCookies(request));
       const { identity, tokens } = await services.signIn.signIn(body, request.ip ?? '');
+      const before = await services.sessions.resume(readSessionCookies(request));
       if (before?.identity.by.kind === 'session') await services.sessions.end(before.identity.by.sessionId, 'replaced');
       setSessionCookies(response, tokens);
       return { status: 201, body: presentSession(identity) };

@@ -23,12 +23,18 @@ test.each([
   ['holding NaN', '{"scenario": NaN}'],
   ['nested too deep', `{"scenario": ${nested(DEPTH_LIMIT)}}`],
   ['nested a hundred thousand deep', nested(100_000)],
-  ['holding U+0000', JSON.stringify({ scenario: sampleScenario({ name: 'a\0b' }) })],
-  ['holding half a character', JSON.stringify({ scenario: sampleScenario({ notes: '\ud83d' }) })],
 ])('a body %s is malformed', async (_what, body) => {
   const answer = await post(body).expect(400);
   expect(answer.body).toMatchObject({ code: 'malformed-body', status: 400 });
   expect(answer.headers['content-type']).toMatch(/^application\/problem\+json/);
+});
+
+test.each([
+  ['U+0000', 'name', { name: 'a\0b' }],
+  ['half a character', 'notes', { notes: '\ud83d' }],
+])('text that the database cannot hold is refused with the field named: %s', async (_what, field, wrong) => {
+  const answer = await post(JSON.stringify({ scenario: sampleScenario(wrong) })).expect(400);
+  expect(answer.body).toMatchObject({ code: 'invalid-input', issues: [{ path: `scenario.${field}` }] });
 });
 
 test('brackets inside text do not count as depth', async () => {

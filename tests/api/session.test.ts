@@ -63,6 +63,14 @@ describe('signing in', () => {
     expect((await sessionRow(before)).endedBecause).toBe('replaced');
   });
 
+  test('that fails leaves the session alone that the browser has', async () => {
+    const before = await server.signIn(person);
+    server.wait(11 * MINUTE);
+    await server.send('post', '/api/session', before, { email: person.email, password: 'not the password' }).expect(401);
+    server.wait(MINUTE);
+    await read(before).expect(200);
+  });
+
   test('reads a password beyond 72 bytes to its end', async () => {
     const long = 'x'.repeat(80);
     await server.database.query('UPDATE person SET password_hash = $2 WHERE id = $1', [server.people.librarian.id, await server.composed.passwords.hash(`${long}1`)]);

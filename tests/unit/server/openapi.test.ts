@@ -1,4 +1,5 @@
-import OpenAPISchemaValidator from 'openapi-schema-validator';
+import { execFileSync } from 'node:child_process';
+import { join } from 'node:path';
 
 import { openApiDocument, openApiPath, problemsOf } from '../../../server/http/openapi';
 import { openApiPage } from '../../../server/http/openapi-page';
@@ -16,6 +17,9 @@ interface Operation {
 const document = JSON.parse(JSON.stringify(openApiDocument(ROUTE_TABLE))) as Json & { paths: Record<string, Record<string, Operation>>; components: { schemas: Record<string, Json> } };
 const operations = ROUTE_TABLE.map((route) => ({ route, operation: document.paths[openApiPath(route.path)]![route.method]! }));
 
+const validated = (given: Json): unknown =>
+  JSON.parse(execFileSync(process.execPath, [join(__dirname, '..', '..', 'support', 'validate-openapi.mjs')], { input: JSON.stringify(given), encoding: 'utf8' }));
+
 const walk = (value: unknown, visit: (node: Json, path: string) => void, path = ''): void => {
   if (typeof value !== 'object' || value === null) return;
   if (!Array.isArray(value)) visit(value as Json, path);
@@ -23,10 +27,8 @@ const walk = (value: unknown, visit: (node: Json, path: string) => void, path = 
 };
 
 test('the document is valid OpenAPI 3.1', () => {
-  const validator = new OpenAPISchemaValidator({ version: 3.1 });
-  expect(validator.validate(document as never).errors).toEqual([]);
-  const { paths: _paths, ...broken } = document;
-  expect(validator.validate({ ...broken, info: {} } as never).errors).not.toEqual([]);
+  expect(validated(document)).toEqual({ valid: true, version: '3.1', errors: [] });
+  expect(validated({ ...document, info: {} })).toMatchObject({ valid: false });
 });
 
 test('it holds every route of the table, and nothing else', () => {
