@@ -20,8 +20,11 @@ export interface DraftState {
   theirs: ScenarioRecord | null;
 }
 
+export type Change = readonly [path: string, value: DraftNode];
+
 export type DraftAction =
-  | { type: 'edit'; path: string; value: DraftNode; at: number }
+  /** `also` are values elsewhere that change in the same step. */
+  | { type: 'edit'; path: string; value: DraftNode; also?: readonly Change[]; at: number }
   | { type: 'undo' }
   | { type: 'redo' }
   | { type: 'saved'; sent: Draft; record: ScenarioRecord }
@@ -50,8 +53,9 @@ const step = (state: DraftState, present: Draft): DraftState => ({
   future: [],
 });
 
-const edit = (state: DraftState, { path, value, at }: Extract<DraftAction, { type: 'edit' }>): DraftState => {
-  const present = withNode(state.present, path, value);
+const edit = (state: DraftState, { path, value, also = [], at }: Extract<DraftAction, { type: 'edit' }>): DraftState => {
+  const changes: readonly Change[] = [[path, value], ...also];
+  const present = changes.reduce((draft, [where, what]) => withNode(draft, where, what), state.present);
   const sameStep = state.lastEdit?.path === path && at - state.lastEdit.at < SAME_STEP_MS && state.past.length > 0;
   const next = sameStep ? { ...state, present, future: [] } : step(state, present);
   return { ...next, lastEdit: { path, at } };

@@ -7,7 +7,7 @@ import type { Scenario } from '@/shared/model/scenario';
 
 import { differencesBetween, mergeDrafts, type Difference } from './draft-difference';
 import { forgetDraft, keepDraft, keptDraft } from './draft-keep';
-import { isDirty, reduceDraft, startDraft, type DraftState } from './draft-state';
+import { isDirty, reduceDraft, startDraft, type Change, type DraftState } from './draft-state';
 import { draftOf, type Draft, type DraftNode } from './draft-tree';
 import type { Issues, Reading } from './read-draft';
 import { useAutosave } from './useAutosave';
@@ -32,7 +32,8 @@ export interface DraftControls {
   /** Fetches the reader before the first key is pressed. */
   prepare: () => void;
   readOnly: boolean;
-  edit: (path: string, value: DraftNode) => void;
+  /** Undefined takes a field or block away; `also` are changes elsewhere in the same undo step. */
+  edit: (path: string, value: DraftNode, also?: readonly Change[]) => void;
   undo: (() => void) | null;
   redo: (() => void) | null;
   version: number;
@@ -115,7 +116,7 @@ export const useDraft = (record: ScenarioRecord, userId: string): DraftControls 
   useEffect(() => dispatch({ type: 'changed-elsewhere', record }), [record]);
   const { saving, error, retry } = useAutosave(record.id, state, reading, dispatch);
 
-  const edit = useCallback((path: string, value: DraftNode) => dispatch({ type: 'edit', path, value, at: Date.now() }), []);
+  const edit = useCallback((path: string, value: DraftNode, also: readonly Change[] = []) => dispatch({ type: 'edit', path, value, also, at: Date.now() }), []);
   const conflict = useMemo(() => conflictOf(state, reading, (draft) => dispatch({ type: 'resolved', draft })), [state, reading]);
   useEffect(() => {
     if (conflict?.differences.length === 0) dispatch({ type: 'resolved', draft: null });

@@ -37,3 +37,6 @@ export const useSignOut = () => {
     },
   });
 };
+
+/** Whether this person's role lets them make and change scenarios. */
+export const useMayDesign = (): boolean => useSession().data?.user.roles.includes('designer') ?? false;
