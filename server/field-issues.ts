@@ -1,5 +1,7 @@
 import type { z } from 'zod';
 
+import { plainWords } from '../shared/model/plain-words';
+
 export interface FieldIssue {
   /** Such as bulk.capacitance; empty for the whole. */
   path: string;
@@ -28,7 +30,7 @@ const flatten = (issue: z.core.$ZodIssue, above: readonly PropertyKey[]): FieldI
 
 /** Reads what came from outside; every wrong field is named in plain words. */
 export const readFields = <Schema extends z.ZodType>(schema: Schema, given: unknown): ReadFields<z.output<Schema>> => {
-  const read = schema.safeParse(given, { error: ({ input }) => (input === undefined ? 'is missing' : undefined) });
+  const read = schema.safeParse(given, { error: plainWords });
   if (read.success) return { ok: true, value: read.data };
   const issues = read.error.issues.flatMap((issue) => flatten(issue, []));
   return { ok: false, issues: issues.slice(0, MOST_ISSUES) };

@@ -60,8 +60,11 @@ const readSingle = (raw: Raw, dimension: Dimension, wanted: Qualifier | undefine
   return null;
 };
 
+/** −40 °C less 40 K is −80 °C but for the last digit of a float. */
+const FLOAT_SLACK = 1e-12;
+
 const refuseOutside = (value: number, dimension: Dimension, range: QuantityRange, issue: Issue): boolean => {
-  if (value >= range.min && value <= range.max) return false;
+  if (value >= range.min * (1 - FLOAT_SLACK) && value <= range.max * (1 + FLOAT_SLACK)) return false;
   const [text, min, max] = [value, range.min, range.max].map((one) => formatQuantity(one, dimension));
   issue(`${text} is outside ${min} to ${max}`);
   return true;
