@@ -26,13 +26,18 @@ export class WorkerPool<Task, Result> {
     this.pool = new Piscina<Task, Result>({ filename, name: 'run', minThreads: threads, maxThreads: threads, execArgv: ['-r', TYPESCRIPT_HOOK] });
   }
 
+  /** Tasks that wait for a thread. */
+  get waiting(): number {
+    return this.pool.queueSize;
+  }
+
   /**
    * @param signal drops a waiting task, and stops the thread of a running one
    * @throws {ProblemError} busy, when too many wait already
    */
   run(task: Task, signal?: AbortSignal): Promise<Result> {
     // Piscina's own maxQueue lets tasks through that come one by one (5.3.2), so it is counted here.
-    if (this.pool.queueSize >= this.mostWaiting)
+    if (this.waiting >= this.mostWaiting)
       return Promise.reject(new ProblemError('busy', 'Others are waiting already; try again in a moment.', { retryAfter: RETRY_AFTER }));
     return this.pool.run(task, signal ? { signal } : {});
   }

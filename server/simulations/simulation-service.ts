@@ -15,6 +15,11 @@ export type SimulationPool = WorkerPool<SimulationTask, Simulated>;
 export class SimulationService {
   constructor(private readonly pool: SimulationPool) {}
 
+  /** Runs that wait for a thread. */
+  get waiting(): number {
+    return this.pool.waiting;
+  }
+
   /** Computes once in every thread, so that the first person does not wait for the code to be loaded and compiled. */
   async warmUp(): Promise<void> {
     await Promise.all(Array.from({ length: this.pool.threads }, () => this.assess(WARM_UP_SCENARIO)));

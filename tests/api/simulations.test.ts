@@ -107,10 +107,12 @@ describe('while the engine is at work', () => {
     const held = await holdBothThreads(notes);
     const hangUp = new AbortController();
     const waiting = start('abandoned', notes, hangUp.signal).catch(() => 'hung up');
+    await until(() => server.composed.simulations.waiting === 1);
     const later = start('later', notes);
+    await until(() => server.composed.simulations.waiting === 2);
     hangUp.abort();
     expect(await waiting).toBe('hung up');
-    await server.send('get', '/api/health', null).expect(200);
+    await until(() => server.composed.simulations.waiting === 1);
     release(notes);
     await Promise.all([...held, later]);
     expect(begun(notes)).not.toContain('abandoned');
