@@ -1,6 +1,6 @@
 import type { Server } from 'node:http';
 import { setTimeout as wait } from 'node:timers/promises';
-import pino, { type Logger } from 'pino';
+import type { Logger } from 'pino';
 import type { DataSource } from 'typeorm';
 
 import { ENGINE_VERSION } from '../simulation';
@@ -11,6 +11,7 @@ import { createDataSource } from './database/data-source';
 import { migrate } from './database/migrate';
 import { seedDemo } from './demo/seed';
 import { compressClient } from './http/compress-client';
+import { createLog } from './log';
 
 const CONNECT_ATTEMPTS = 30;
 /** Milliseconds that requests under way get to end. */
@@ -62,7 +63,7 @@ const stopOnSignal = (log: Logger, stop: () => Promise<void>): void => {
 };
 
 const start = async (config: Config): Promise<void> => {
-  const log = pino({ level: config.logLevel }, pino.destination(2));
+  const log = createLog(config.logLevel);
   const database = createDataSource(config.databaseUrl, log);
   await connect(database);
   await migrate(database);

@@ -11,6 +11,7 @@ import { SessionRow } from '../sessions/session-entity';
 import { Person, RoleGrant } from '../teams/person-entity';
 import { Team } from '../teams/team-entity';
 import { FirstTables1764565200000 } from './migrations/1764565200000-first-tables';
+import { VerdictsToCompute1764568800000 } from './migrations/1764568800000-verdicts-to-compute';
 
 /** The one place that knows every table. Tables change by migrations only. */
 export const createDataSource = (url: string, log: Logger): DataSource =>
@@ -18,7 +19,7 @@ export const createDataSource = (url: string, log: Logger): DataSource =>
     type: 'postgres',
     url,
     entities: [Team, Person, RoleGrant, SessionRow, RefreshToken, ApiToken, ScenarioRow, PartRow],
-    migrations: [FirstTables1764565200000],
+    migrations: [FirstTables1764565200000, VerdictsToCompute1764568800000],
     synchronize: false,
     installExtensions: false,
     poolSize: 10,

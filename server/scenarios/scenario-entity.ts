@@ -9,6 +9,7 @@ import { Team } from '../teams/team-entity';
 /** A draft, with what the engine last said of it. */
 @Entity({ name: 'scenario' })
 @Index('scenario_list_idx', ['teamId', 'updatedAt', 'id'])
+@Index('scenario_to_compute_idx', ['updatedAt'], { where: 'verdict IS NULL' })
 export class ScenarioRow {
   @PrimaryColumn({ type: 'uuid', primaryKeyConstraintName: 'scenario_pkey' })
   id: string;
