@@ -10,7 +10,7 @@ interface RequestOptions {
 }
 
 /** Told apart from a failed network: the person or a newer request called it off. */
-const isAbort = (error: unknown) => error instanceof Error && error.name === 'AbortError';
+const isAbort = (error: unknown) => typeof error === 'object' && error !== null && 'name' in error && error.name === 'AbortError';
 
 const readJson = async (response: Response): Promise<unknown> => {
   try {
