@@ -46,45 +46,57 @@ export interface Judgement {
   failure?: string | null;
 }
 
-/** Use of a rating: 1 at the rating, above 1 beyond it, whatever the sense. */
-export const useOf = (sense: 'at-most' | 'at-least', value: number, rating: number): number => {
+/** Use of a rating: 1 at the rating, above 1 beyond it, whatever the sense; null where nothing at all is allowed or left. */
+export const useOf = (sense: 'at-most' | 'at-least', value: number, rating: number): number | null => {
   const [part, whole] = sense === 'at-most' ? [value, rating] : [rating, value];
   if (part <= 0) return 0;
-  return whole > 0 ? part / whole : BEYOND;
+  return whole > 0 ? part / whole : null;
 };
 
-/** Stands for a use without bound (nothing is allowed, or nothing is left), which JSON cannot carry. */
-export const BEYOND = 1e6;
+interface Use {
+  ratio: number | null;
+  /** Beyond any share of a rating. */
+  unbounded: boolean;
+}
 
-const ratioOf = (judgement: Judgement, value: number | null, rating: number | null, above: number): number | null =>
-  value === null || rating === null || !Number.isFinite(value) ? null : useOf(judgement.sense, value - above, rating - above);
+const useIn = (sense: Judgement['sense'], value: number | null, rating: number | null, above: number): Use => {
+  if (value === null || rating === null || !Number.isFinite(value)) return { ratio: null, unbounded: false };
+  const ratio = useOf(sense, value - above, rating - above);
+  return { ratio, unbounded: ratio === null };
+};
 
-const statusOf = (judgement: Judgement, ratio: number | null, cautionBelow: number): Status => {
-  if (judgement.failure) return 'fail';
+const statusOf = (judgement: Judgement, { ratio, unbounded }: Use, cautionBelow: number): Status => {
+  if (judgement.failure || unbounded) return 'fail';
   if (ratio !== null && ratio > 1) return 'fail';
   if (ratio === null || judgement.missing?.length) return 'not-assessed';
   return 1 - ratio < cautionBelow || judgement.cautions?.length ? 'caution' : 'pass';
 };
 
-const MISSING = (figures: readonly string[]): string[] => (figures.length ? [`Missing: ${figures.join('; ')}.`] : []);
+const NOTHING_ALLOWED = { 'at-most': 'In this case the rating allows nothing at all.', 'at-least': 'In this case nothing at all is left.' } as const;
+
+const remarksOf = (judgement: Judgement, { unbounded }: Use): string[] => {
+  const { failure, missing = [], cautions = [], notes = [], finding: found } = judgement;
+  const unanswered = found.value === null && missing.length === 0 && !failure;
+  return [
+    ...(failure ? [failure] : []),
+    ...(unbounded ? [NOTHING_ALLOWED[judgement.sense]] : []),
+    ...(missing.length ? [`Missing: ${missing.join('; ')}.`] : cautions),
+    ...(unanswered ? ['The run ended before it could answer this.'] : []),
+    ...notes,
+  ];
+};
 
 /** A rating that is absent makes "not assessed"; a value beyond one that is present fails all the same. */
 export const judge = (judgement: Judgement, cautionBelow: number): Check => {
   const { id, finding: found, rating, above = { worst: 0, nominal: 0 } } = judgement;
-  const ratio = ratioOf(judgement, found.value, rating, above.worst);
-  const unanswered = found.value === null && !judgement.missing?.length && !judgement.failure;
-  const remarks = [
-    ...(judgement.failure ? [judgement.failure] : []),
-    ...MISSING(judgement.missing ?? []),
-    ...(unanswered ? ['The run ended before it could answer this.'] : []),
-    ...(judgement.cautions ?? []),
-    ...(judgement.notes ?? []),
-  ];
+  const use = useIn(judgement.sense, found.value, rating, above.worst);
+  const { ratio } = use;
+  const remarks = remarksOf(judgement, use);
   return {
     id,
     element: judgement.element ?? null,
     title: CHECKS[id].title,
-    status: statusOf(judgement, ratio, cautionBelow),
+    status: statusOf(judgement, use, cautionBelow),
     dimension: judgement.dimension,
     kind: judgement.kind ?? null,
     sense: judgement.sense,
@@ -92,7 +104,7 @@ export const judge = (judgement: Judgement, cautionBelow: number): Check => {
     nominal: found.nominal,
     rating,
     ratio,
-    nominalRatio: ratioOf(judgement, found.nominal, judgement.nominalRating ?? rating, above.nominal),
+    nominalRatio: useIn(judgement.sense, found.nominal, judgement.nominalRating ?? rating, above.nominal).ratio,
     margin: ratio === null ? null : 1 - ratio,
     corner: found.corner,
     phase: found.phase,

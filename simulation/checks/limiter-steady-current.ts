@@ -20,7 +20,7 @@ const fade = (ambient: number, from: number, share: number, maximum: number): nu
  * point of a curve it fades the same way, and is flagged.
  */
 export const deratedCurrent = (rating: CurrentRating, ambient: number, maximum: number | undefined): DeratedCurrent => {
-  const points = [...(rating.derating ?? [])].sort((a, b) => a.ambient - b.ambient);
+  const points = rating.derating ?? [];
   const [first, last] = [points[0], points[points.length - 1]];
   if (!first || !last) {
     if (ambient <= rating.ambient) return { current: rating.current, beyondCurve: false };

@@ -8,9 +8,13 @@ export const setAsideIn = (checks: readonly Check[], setAside: Scenario['setAsid
 
 const rank = (check: Check): number => (check.setAside === null ? 0 : STATUSES.length) + STATUSES.indexOf(check.status);
 
+/** A failure beyond any number is the worst of its kind; any other check without a margin comes last. */
+const marginOf = ({ margin, status }: Check): number => margin ?? (status === 'fail' ? -Infinity : Infinity);
+const byMargin = (a: Check, b: Check): number => (marginOf(a) === marginOf(b) ? 0 : marginOf(a) - marginOf(b));
+
 /** Fail, not assessed, caution, pass; the smallest margin first in each; what was set aside comes last. */
 export const inOrder = (checks: readonly Check[]): Check[] =>
-  [...checks].sort((a, b) => rank(a) - rank(b) || (a.margin ?? Infinity) - (b.margin ?? Infinity) || 0);
+  [...checks].sort((a, b) => rank(a) - rank(b) || byMargin(a, b));
 
 /** The worst status of the checks that count. With none left there is nothing that was assessed. */
 export const verdictOf = (checks: readonly Check[]): Verdict => {

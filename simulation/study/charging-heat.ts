@@ -39,7 +39,8 @@ const studyEnergy = (trials: Trials, index: number, { ratings }: Part): Studied 
     });
   const allowed = (one: Situation): number => (rating ? deratedEnergy(rating, ambientAt(scenario, one.levels), maximumTemperature) : 1);
   const found = searchWorst(trials, (levels, phase) => orNever(energyIn({ levels, phase })) / Math.max(allowed({ levels, phase }), 1e-9));
-  const finding = findingOf(trials, found, energyIn);
+  const simulated = rating?.basis !== 'half-cv2-rms' && rating?.basis !== 'half-cv2-peak';
+  const finding = findingOf(trials, found, energyIn, simulated);
   const start = { worst: ambientAt(scenario, found.worst.levels), nominal: scenario.ambient.nominal };
   return { check: limiterEnergyCheck({ element: index, finding, start, ratings }, scenario.cautionBelow), situation: found.worst };
 };

@@ -26,13 +26,15 @@ interface EnergyPoint {
   use: number;
 }
 
+/** ½CV² is no simulated quantity. */
+const isSimulated = ({ energy }: Part['ratings']): boolean => energy?.basis !== 'half-cv2-rms' && energy?.basis !== 'half-cv2-peak';
+
 const meterOf = (trials: Trials, index: number, { ratings }: Part, phase: number) => {
   const { energy: rating, maximumTemperature } = ratings;
   const basis = rating?.basis ?? 'absorbed';
   return (levels: Levels, soak: SoakState, offTime: number): EnergyPoint => {
     const start = restartState(trials, levels, soak, offTime);
-    const needsRun = basis === 'absorbed' || basis === 'unknown';
-    const element = needsRun ? trials.from({ levels, phase }, start, 'charged').elements[index] : undefined;
+      const element = isSimulated(ratings) ? trials.from({ levels, phase }, start, 'charged').elements[index] : undefined;
     const energy =
       comparedEnergy(basis, {
         absorbed: element ? (element.chargeEnergy ?? element.energy) : null,
@@ -73,7 +75,7 @@ const studyElement = (trials: Trials, index: number, part: Part): Studied => {
     value: top.energy,
     nominal: nominal.energy,
     corner: cornerOf(trials.ranges, levels),
-    phase: source.kind === 'ac' ? roundedDegrees(phase) : null,
+    phase: source.kind === 'ac' && isSimulated(part.ratings) ? roundedDegrees(phase) : null,
     offTime: top.offTime,
   };
   const start = { worst: top.start, nominal: nominal.start };

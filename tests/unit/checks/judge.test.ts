@@ -35,11 +35,18 @@ describe('a value held against a lower limit', () => {
     expect(check).toMatchObject({ status: 'pass', ratio: 0.75, nominalRatio: 0.6, margin: 0.25 });
   });
 
-  it('fails below the rating, and a value of nothing is a finite use beyond any', () => {
+  it('fails below the rating', () => {
     expect(judge(current({ sense: 'at-least', finding: finding(100, null), rating: 150 }), 0.1)).toMatchObject({ status: 'fail', margin: -0.5 });
-    const nothing = judge(current({ sense: 'at-least', finding: finding(0, null), rating: 150 }), 0.1);
-    expect(nothing.status).toBe('fail');
-    expect(Number.isFinite(nothing.ratio)).toBe(true);
+  });
+});
+
+describe('a use without bound', () => {
+  it('fails in words instead of a number that no one can read', () => {
+    const nothingLeft = judge(current({ sense: 'at-least', finding: finding(0, null), rating: 150 }), 0.1);
+    expect(nothingLeft).toMatchObject({ status: 'fail', ratio: null, margin: null });
+    expect(nothingLeft.remark).toContain('nothing at all is left');
+    expect(judge(current({ rating: 0 }), 0.1)).toMatchObject({ status: 'fail', ratio: null });
+    expect(judge(current({ finding: finding(0, null), rating: 0 }), 0.1)).toMatchObject({ status: 'pass', ratio: 0 });
   });
 });
 
