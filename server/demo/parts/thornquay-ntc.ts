@@ -15,7 +15,7 @@ export const THORNQUAY_NTC = [
       maximumTemperature: '160 °C',
       steadyCurrent: { current: '1.6 A rms', ambient: '25 °C' },
       energy: { energy: '17 J', basis: 'absorbed' },
-      capacitance: { capacitance: '300u', voltage: '240 V', voltageIs: 'rms' },
+      capacitance: { capacitance: '350u', voltage: '240 V', voltageIs: 'rms' },
     },
   }),
   documented('d755df98-8d89-40a3-9903-f4cb5455eb3a', SHEET, {

@@ -29,7 +29,7 @@ export const OVER_ENERGY: DemoScenario = {
     bulk: { capacitance: '330 µF ±20 %', esr: '150 mΩ' },
     load: { kind: 'constant-power', power: '50 W', startVoltage: '180 V', startDelay: '100 ms', rampTime: '20 ms' },
     ambient: { nominal: '25 °C', min: '0 °C', max: '45 °C' },
-    limits: { peakCurrent: '100 A peak', limiterLoss: '4 W' },
+    limits: { peakCurrent: '150 A peak', limiterLoss: '4 W' },
   },
 };
 
@@ -51,7 +51,7 @@ export const WITHIN_RATINGS: DemoScenario = {
       breakingCapacity: '1.5 kA rms',
       resistance: '60 mΩ',
     },
-    limiter: [{ part: fromLibrary('Aldersyke Lapwing') }],
+    limiter: [{ part: fromLibrary('Aldersyke Whimbrel') }],
     rectifier: bridge('100 A', '50 A²s'),
     bulk: { capacitance: '100 µF ±20 %', esr: '300 mΩ', bleeder: '220k' },
     load: { kind: 'constant-power', power: '40 W', startVoltage: '180 V', stopVoltage: '120 V', startDelay: '100 ms', rampTime: '20 ms' },
@@ -89,6 +89,6 @@ export const RAIL_FAULT: DemoScenario = {
     fault: { kind: 'resistance', at: '30 s', resistance: '500 mΩ' },
     ambient: { nominal: '23 °C', min: '-10 °C', max: '50 °C' },
     duration: '120 s',
-    limits: { timeToTrip: '10 s', voltageDrop: '300 mV', steadyCurrent: '1.1 A rms', limiterLoss: '1 W' },
+    limits: { peakCurrent: '30 A peak', timeToTrip: '10 s', voltageDrop: '300 mV', steadyCurrent: '1.1 A rms', limiterLoss: '1 W' },
   },
 };
