@@ -22,7 +22,7 @@ export const tokenRoutes: readonly Route[] = [
     name: 'createToken',
     tag: 'Tokens',
     summary: 'Make a token for a program',
-    description: 'It acts as you, with the roles that you have when it is used. Send it as `Authorization: Bearer …`. The secret is shown only now.',
+    description: 'It acts as you, with the roles that you have when it is used. Send it in the header Authorization, after the word Bearer. The secret is shown only now.',
     who: ROLES,
     sessionOnly: true,
     body: createTokenSchema,

@@ -50,7 +50,8 @@ const bodyFor = (route: Route): fc.Arbitrary<unknown> => {
   return fc.oneof(nasty, fc.dictionary(fc.constantFrom('name', 'days', 'other'), nasty));
 };
 
-const searchOf = (query: Record<string, unknown>) => new URLSearchParams(Object.entries(query).map(([key, value]): [string, string] => [key, String(value).toWellFormed()])).toString();
+const written = (value: unknown): string => (typeof value === 'string' ? value : JSON.stringify(value) ?? '').toWellFormed();
+const searchOf = (query: Record<string, unknown>) => new URLSearchParams(Object.entries(query).map(([key, value]): [string, string] => [key, written(value)])).toString();
 
 test.each(ROUTE_TABLE.filter(({ name }) => name !== 'signOut').map((route) => [route.name, route] as const))(
   '%s answers whatever is thrown at it, and never with a fault of its own',
