@@ -43,7 +43,7 @@ const COLUMNS: readonly Column<PartSummary>[] = [
   { key: 'current', title: 'Steady current', width: 116, align: 'right', render: ({ part }) => <Quantity value={part.ratings.steadyCurrent?.current ?? null} dimension="current" kind="rms" variant="label" /> },
   { key: 'energy', title: 'Energy', width: 96, align: 'right', render: ({ part }) => <Quantity value={part.ratings.energy?.energy ?? null} dimension="energy" variant="label" /> },
   { key: 'temperature', title: 'Highest body', width: 110, align: 'right', render: ({ part }) => <Quantity value={part.ratings.maximumTemperature ?? null} dimension="temperature" variant="label" /> },
-  { key: 'approval', title: 'Approval', width: 190, render: ({ approvedBy, revision }) => <Text variant="label" tone={approvedBy ? 'ink' : 'caution'} numberOfLines={1}>{approvedBy ? `rev ${revision}, ${approvedBy}` : `rev ${revision}, not approved`}</Text> },
+  { key: 'approval', title: 'Approval', width: 190, align: 'right', render: ({ approvedBy, revision }) => <Text variant="label" tone={approvedBy ? 'ink' : 'caution'} numberOfLines={1}>{approvedBy ? `rev ${revision}, ${approvedBy}` : `rev ${revision}, not approved`}</Text> },
 ];
 
 /** The part library as a table: searched, by kind, each name an address of its own. */

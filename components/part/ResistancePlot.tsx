@@ -40,7 +40,7 @@ export const ResistancePlot = ({ record: { part, curve } }: { record: PartRecord
   const callout = calloutOf(part);
   return (
     <View style={{ gap: 8 }}>
-      <LegendBracket title="Resistance against temperature" remark={`log R; ${LAW_TEXT[part.law.law]}, band from tolerance`} />
+      <LegendBracket title={wide ? 'Resistance against temperature' : 'R against temperature'} remark={wide ? `log R; ${LAW_TEXT[part.law.law]}, band from tolerance` : LAW_TEXT[part.law.law]} />
       <Measured height={height}>
         {(width) => (
           <CurvePlot

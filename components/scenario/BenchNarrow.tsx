@@ -6,7 +6,7 @@ import { Button } from '@/components/ui/Button';
 import { BenchChecks, BenchEditor, BenchPlot, BenchStrip, BenchVerdict } from './BenchParts';
 import type { Bench } from './useBench';
 
-const PLOT_HEIGHT = 410;
+const PLOT_HEIGHT = 392;
 
 /** Phone: verdict, path, plot, checks, fields below one another; while a block is edited its fields come right below the path. */
 export const BenchNarrow = ({ bench }: { bench: Bench }) => {

@@ -7,10 +7,10 @@ import { useTheme } from '@/components/ui/theme';
 const pulse = (x: number, height: number, width: number) => `M${x} 150c${width * 0.25} ${-height * 1.33} ${width * 0.75} ${-height * 1.33} ${width} 0`;
 
 /** An inrush pulse held below its rating line: the tool's purpose in one picture. */
-export const GatePicture = () => {
+export const GatePicture = ({ height }: { height: number }) => {
   const { colors } = useTheme();
   return (
-    <Svg width="100%" height={180} viewBox="0 0 560 180" preserveAspectRatio="xMinYMid meet" aria-hidden>
+    <Svg width="100%" height={height} viewBox="0 0 560 180" preserveAspectRatio="xMinYMid meet" aria-hidden>
       {[0, 1, 2, 3, 4, 5, 6, 7].map((tick) => <Line key={tick} x1={tick * 80} x2={tick * 80} y1={10} y2={150} stroke={colors.rule} />)}
       <Line x1={0} x2={560} y1={40} y2={40} stroke={colors.ink} strokeWidth={1.3} />
       <SvgText x={556} y={34} textAnchor="end" fontSize={12.5} fontFamily={FAMILY.text} fill={colors.ink}>peak limit</SvgText>

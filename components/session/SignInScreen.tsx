@@ -55,7 +55,7 @@ export const SignInScreen = () => {
           <BrandMark size={wide ? 40 : 32} />
           <Text variant="verdict" strong heading={1}>Tidegate</Text>
         </View>
-        <GatePicture />
+        <GatePicture height={wide ? 340 : 130} />
         <Text tone="quiet" style={{ maxWidth: 520 }}>Sizes inrush current limiters and resettable fuses, and proves the choice by computation: over line, ambient, tolerance and switching angle, and when power comes back.</Text>
       </View>
       <View style={{ width: wide ? 440 : undefined, padding: wide ? 40 : 16, paddingTop: wide ? 40 : 24, gap: 24, justifyContent: wide ? 'center' : 'flex-start' }}>

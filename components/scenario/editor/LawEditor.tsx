@@ -33,12 +33,12 @@ const BLANK: Record<Kind, DraftNode> = {
   resistor: { law: 'fixed', resistance: blankBand },
 };
 
-const NtcRows = ({ law }: { law: string }) => {
+const NtcRows = ({ law, typed }: { law: string; typed: boolean }) => {
   const { draft, edit } = useEditor();
   const kind = NTC_LAWS.find(({ value }) => value === nodeAt(draft, `${law}.law`))?.value ?? 'b-value';
   return (
     <>
-      <PickRow label="R(T) given as" hideLabel options={NTC_LAWS} value={kind} onPick={(next) => edit(law, NTC_BLANK[next], detached(draft, law))} />
+      {typed ? <PickRow label="R(T) given as" hideLabel options={NTC_LAWS} value={kind} onPick={(next) => edit(law, NTC_BLANK[next], detached(draft, law))} /> : null}
       {kind === 'b-value' ? (
         <>
           <TolerancedRow path={`${law}.r25`} />
@@ -58,8 +58,8 @@ const NtcRows = ({ law }: { law: string }) => {
   );
 };
 
-/** Which kind of element it is, and its resistance against temperature by figures or by coefficients. */
-export const LawEditor = ({ base }: { base: string }) => {
+/** Resistance against temperature by figures or by coefficients; kind and law are chosen only for a part that the person types. */
+export const LawEditor = ({ base, typed }: { base: string; typed: boolean }) => {
   const { draft, edit } = useEditor();
   const law = `${base}.law`;
   const kind = KINDS.find(({ value }) => value === nodeAt(draft, `${base}.kind`))?.value ?? 'ntc';
@@ -69,8 +69,8 @@ export const LawEditor = ({ base }: { base: string }) => {
   };
   return (
     <>
-      <PickRow label="Kind of element" hideLabel options={KINDS} value={kind} onPick={change} />
-      {kind === 'ntc' ? <NtcRows law={law} /> : null}
+      {typed ? <PickRow label="Kind of element" hideLabel options={KINDS} value={kind} onPick={change} /> : null}
+      {kind === 'ntc' ? <NtcRows law={law} typed={typed} /> : null}
       {kind === 'polymer-ptc' ? (
         <>
           <TolerancedRow path={`${law}.low`} alwaysEnds ends={['R_min', 'R_1max']} />

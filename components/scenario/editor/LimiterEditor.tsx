@@ -63,8 +63,10 @@ export const LimiterEditor = ({ index }: { index: number }) => {
   const [choosingFor, setChoosingFor] = useState<number | null>(null);
   const elements = listAt(draft, 'limiter');
   const base = `limiter.${index}`;
+  const [typed, setTyped] = useState(() => nodeAt(draft, `${base}.part.libraryId`) === undefined);
   const choose = (summary: PartSummary) => {
     if (choosingFor !== null) edit(choosingFor < elements.length ? `limiter.${choosingFor}.part` : `limiter.${choosingFor}`, choosingFor < elements.length ? fromLibrary(summary) : { part: fromLibrary(summary) });
+    setTyped(false);
     setChoosingFor(null);
   };
   const dialog = <PartDialog open={choosingFor !== null} current={nodeAt(draft, `${base}.part.libraryId`)} onClose={() => setChoosingFor(null)} onChoose={choose} />;
@@ -73,13 +75,14 @@ export const LimiterEditor = ({ index }: { index: number }) => {
     <View style={{ gap: 14 }}>
       <Section title={elements.length > 1 ? `Limiter ${index + 1} of ${elements.length}` : 'Limiter'}>
         <PartHead base={base} onChange={() => setChoosingFor(index)} />
-        <LawEditor base={`${base}.part`} />
-        <ThermalRows base={`${base}.part.thermal`} />
-        {nodeAt(draft, `${base}.part.libraryId`) === undefined ? <WordsRow path={`${base}.part.name`} label="Name of the part" maxLength={80} /> : null}
+        <LawEditor base={`${base}.part`} typed={typed} />
+        <ThermalRows base={`${base}.part.thermal`} typed={typed} />
+        {typed ? <WordsRow path={`${base}.part.name`} label="Name of the part" maxLength={80} /> : null}
       </Section>
       <BypassEditor base={`${base}.bypass`} />
-      <RatingsEditor base={`${base}.part.ratings`} />
+      <RatingsEditor base={`${base}.part.ratings`} typed={typed} />
       <View style={{ flexDirection: 'row', flexWrap: 'wrap', gap: 8 }}>
+        {typed ? null : <BlockButton label="Type the figures" onPress={() => setTyped(true)} />}
         <SecondElement onAdd={() => setChoosingFor(elements.length)} />
         <BlockButton label="Take this one away" onPress={() => edit(base, undefined)} />
       </View>

@@ -19,36 +19,38 @@ interface GroupProps {
   path: string;
   name: string;
   missing: string;
+  /** The ratings of a library part are added to and taken from in the library. */
+  typed: boolean;
   blank: DraftNode;
   children: React.ReactNode;
 }
 
 /** A rating with its conditions, or the word that it is missing. */
-const RatingGroup = ({ path, name, missing, blank, children }: GroupProps) => {
+const RatingGroup = ({ path, name, missing, typed, blank, children }: GroupProps) => {
   const { draft, edit } = useEditor();
   const change = (value: DraftNode) => edit(path, value, detached(draft, path));
   if (nodeAt(draft, path) === undefined) {
     return (
       <View style={{ gap: 4 }}>
         <Text variant="secondary" tone="quiet">{missing}</Text>
-        <BlockButton label={`Add ${name}`} onPress={() => change(blank)} />
+        {typed ? <BlockButton label={`Add ${name}`} onPress={() => change(blank)} /> : null}
       </View>
     );
   }
   return (
     <View style={{ gap: 4 }}>
       {children}
-      <BlockButton label={`Take ${name} away`} onPress={() => change(undefined)} />
+      {typed ? <BlockButton label={`Take ${name} away`} onPress={() => change(undefined)} /> : null}
     </View>
   );
 };
 
-const EnergyGroup = ({ base }: { base: string }) => {
+const EnergyGroup = ({ base, typed }: { base: string; typed: boolean }) => {
   const { draft, edit } = useEditor();
   const path = `${base}.energy`;
   const basis = BASES.find(({ value }) => value === nodeAt(draft, `${path}.basis`))?.value ?? 'unknown';
   return (
-    <RatingGroup path={path} name="an energy rating" missing="No energy rating: the pulse is not assessed by energy." blank={{ energy: '', basis: 'unknown' }}>
+    <RatingGroup path={path} typed={typed} name="an energy rating" missing="No energy rating: the pulse is not assessed by energy." blank={{ energy: '', basis: 'unknown' }}>
       <QuantityRow path={`${path}.energy`} />
       <PickRow label="The energy is" options={BASES} value={basis} onPick={(next) => edit(`${path}.basis`, next, detached(draft, path))} />
       <QuantityRow path={`${path}.startTemperature`} />
@@ -57,12 +59,12 @@ const EnergyGroup = ({ base }: { base: string }) => {
   );
 };
 
-const CapacitanceGroup = ({ base }: { base: string }) => {
+const CapacitanceGroup = ({ base, typed }: { base: string; typed: boolean }) => {
   const { draft, edit } = useEditor();
   const path = `${base}.capacitance`;
   const peak = nodeAt(draft, `${path}.voltageIs`) === 'peak';
   return (
-    <RatingGroup path={path} name="a capacitance rating" missing="No capacitance rating." blank={{ capacitance: '', voltage: '', voltageIs: 'rms' }}>
+    <RatingGroup path={path} typed={typed} name="a capacitance rating" missing="No capacitance rating." blank={{ capacitance: '', voltage: '', voltageIs: 'rms' }}>
       <QuantityRow path={`${path}.capacitance`} />
       <QuantityRow path={`${path}.voltage`} />
       <PickRow label="The voltage is" options={[{ value: 'rms', label: 'V rms' }, { value: 'peak', label: 'V peak' }]} value={peak ? 'peak' : 'rms'} onPick={(next) => edit(`${path}.voltageIs`, next, detached(draft, path))} />
@@ -71,7 +73,7 @@ const CapacitanceGroup = ({ base }: { base: string }) => {
 };
 
 /** What the part's record allows; each missing figure leaves its check not assessed. */
-export const RatingsEditor = ({ base }: { base: string }) => {
+export const RatingsEditor = ({ base, typed }: { base: string; typed: boolean }) => {
   const { draft } = useEditor();
   const kind = nodeAt(draft, base.replace(/ratings$/, 'kind'));
   const polymer = kind === 'polymer-ptc';
@@ -85,12 +87,12 @@ export const RatingsEditor = ({ base }: { base: string }) => {
         </>
       ) : (
         <View style={{ gap: 12 }}>
-          <RatingGroup path={`${base}.steadyCurrent`} name="a steady current" missing="No steady current rating." blank={{ current: '', ambient: '' }}>
+          <RatingGroup path={`${base}.steadyCurrent`} typed={typed} name="a steady current" missing="No steady current rating." blank={{ current: '', ambient: '' }}>
             <QuantityRow path={`${base}.steadyCurrent.current`} />
             <QuantityRow path={`${base}.steadyCurrent.ambient`} />
           </RatingGroup>
-          <EnergyGroup base={base} />
-          <CapacitanceGroup base={base} />
+          <EnergyGroup base={base} typed={typed} />
+          <CapacitanceGroup base={base} typed={typed} />
         </View>
       )}
     </Section>

@@ -6,7 +6,7 @@ import { QuantityRow } from './QuantityRow';
 import { BlockIssue, PickRow } from './rows';
 
 /** Dissipation factor, with the time constant or the heat capacity (C_th = δ·τ). */
-export const ThermalRows = ({ base }: { base: string }) => {
+export const ThermalRows = ({ base, typed }: { base: string; typed: boolean }) => {
   const { draft, edit, reader } = useEditor();
   const byCapacity = nodeAt(draft, `${base}.heatCapacity`) !== undefined;
   const swap = () => {
@@ -21,7 +21,7 @@ export const ThermalRows = ({ base }: { base: string }) => {
   return (
     <>
       <QuantityRow path={`${base}.dissipation`} />
-      <PickRow label="How fast it warms, given as" hideLabel options={[{ value: 'time', label: 'Time constant' }, { value: 'capacity', label: 'Heat capacity' }]} value={byCapacity ? 'capacity' : 'time'} onPick={swap} />
+      {typed ? <PickRow label="How fast it warms, given as" hideLabel options={[{ value: 'time', label: 'Time constant' }, { value: 'capacity', label: 'Heat capacity' }]} value={byCapacity ? 'capacity' : 'time'} onPick={swap} /> : null}
       <QuantityRow path={byCapacity ? `${base}.heatCapacity` : `${base}.timeConstant`} />
       <BlockIssue path={base} />
     </>

@@ -18,7 +18,8 @@ export const VERDICT_WORD: Record<Status, string> = {
 const plain = (text: string) => ({ text });
 const strong = (text: string) => ({ text, strong: true });
 
-const amount = (value: number, { dimension, kind }: Check) => [formatQuantity(value, dimension), kind].filter(Boolean).join(' ');
+const amount = (value: number, { dimension }: Check) => formatQuantity(value, dimension);
+const kinded = (value: number, check: Check) => [amount(value, check), check.kind].filter(Boolean).join(' ');
 
 const against = (check: Check): Sentence => {
   if (check.rating === null) return [];
@@ -36,7 +37,7 @@ const restart = (check: Check, scenario: Scenario): Sentence => {
 
 const judged = (check: Check, scenario: Scenario): Sentence => {
   if (check.value === null) return [plain(`${check.title}: ${check.remark ?? 'no figure'}`)];
-  return [plain(`${CHECK_WORDS[check.id].lead} `), strong(amount(check.value, check)), ...against(check), ...restart(check, scenario)];
+  return [plain(`${CHECK_WORDS[check.id].lead} `), strong(kinded(check.value, check)), ...against(check), ...restart(check, scenario)];
 };
 
 /** The verdict in plain words, from the check that governs it. */

@@ -13,7 +13,7 @@ const restart = sampleCheck({ id: 'restart-peak-current', title: 'Peak current, 
 
 describe('the verdict in words', () => {
   it('says what is over its limit, and when', () => {
-    expect(sentence('fail', [restart])).toBe('Hot restart draws 195.7 A peak, limit 80 A peak: power back after 178 ms.');
+    expect(sentence('fail', [restart])).toBe('Hot restart draws 195.7 A peak, limit 80 A: power back after 178 ms.');
   });
 
   it('says that power back meets a contact that has not opened yet', () => {
@@ -23,7 +23,7 @@ describe('the verdict in words', () => {
   });
 
   it('names the check closest to its rating when all are within', () => {
-    expect(sentence('pass', [sampleCheck()])).toBe('Closest to its rating: A cold start draws 40 A peak, limit 80 A peak.');
+    expect(sentence('pass', [sampleCheck()])).toBe('Closest to its rating: A cold start draws 40 A peak, limit 80 A.');
   });
 
   it('says what is missing when a check could not be made', () => {
