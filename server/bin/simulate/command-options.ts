@@ -18,6 +18,7 @@ Exit codes:
   0  within ratings
   1  a check fails or is not assessed, the run stopped early, or its audit is not clean
   2  the input was refused: standard error names the field, last line as JSON
+  3  the program itself failed; no statement about the design
 
 A result is "within rating", never "safe": mains voltage, stored charge and hot parts are
 left to local codes and licensed practice.`;
