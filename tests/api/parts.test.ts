@@ -72,6 +72,7 @@ describe('a part', () => {
   test.each(['ntc', 'ptc', 'resistor'])('comes with its curve: %s', async (kind) => {
     const { curve } = await read(ids[kind]!);
     expect(curve.temperature.length).toBeGreaterThan(20);
+    expect(curve.valid.min).toBeLessThan(curve.valid.max);
     for (const series of [curve.nominal, curve.low, curve.high]) expect(series).toHaveLength(curve.temperature.length);
     curve.nominal.forEach((nominal, index) => {
       expect(curve.low[index]!).toBeLessThanOrEqual(nominal);

@@ -172,7 +172,8 @@ describe('the verdict of a saved draft', () => {
     expect(record.verdict).toBeNull();
     await server.composed.verdicts.settled();
     const [summary] = (await list()).scenarios;
-    expect(summary).toMatchObject({ version: 1, verdict: { status: 'fail' }, closest: { id: 'peak-current', status: 'fail', rating: 1 } });
+    expect(summary).toMatchObject({ version: 1, verdict: { status: 'fail' }, closest: { status: 'fail', rating: 1 } });
+    expect(summary!.verdict!.counts.fail).toBeGreaterThan(0);
   });
 
   test('is that of the newest version', async () => {
