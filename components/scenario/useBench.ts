@@ -42,8 +42,8 @@ export const useBench = (record: ScenarioRecord, session: Session) => {
     edit('setAside', reason === null ? others : [...others, { check: of.id, reason }]);
     setOpened(null);
   };
-  /** An edit that cannot be read yet leaves the result behind as well. */
-  const stale = run.stale || issues.size > 0;
+  /** An edit that is not read yet, or cannot be, leaves the result behind as well. */
+  const stale = run.stale || controls.pending || issues.size > 0;
   return { controls, run, stale, blocks, block, page, setPage, editor, check, openCheck: setOpened, closeCheck: () => setOpened(null), select, goTo, setAside };
 };
 export type Bench = ReturnType<typeof useBench>;

@@ -28,6 +28,8 @@ export interface DraftControls {
   /** The draft as last understood; older than the draft while a field cannot be read. */
   scenario: Scenario;
   issues: Issues;
+  /** The last edit has not been read yet: the reader is on its way. */
+  pending: boolean;
   reader: Reader | null;
   /** Fetches the reader before the first key is pressed. */
   prepare: () => void;
@@ -127,6 +129,7 @@ export const useDraft = (record: ScenarioRecord, userId: string): DraftControls 
     draft: state.present,
     scenario,
     issues: issuesOf(reading, error),
+    pending: reading === null,
     reader,
     prepare,
     readOnly: !record.mayEdit,

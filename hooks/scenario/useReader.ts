@@ -4,6 +4,9 @@ import type * as readDraft from './read-draft';
 
 export type Reader = typeof readDraft;
 
+/** Without a connection the script cannot come; it is asked for again at this interval while it is needed. */
+const RETRY_MS = 3000;
+
 let loaded: Reader | null = null;
 let loading: Promise<Reader> | null = null;
 
@@ -26,7 +29,10 @@ export const useReader = (wanted: boolean): { reader: Reader | null; prepare: ()
     load().then(setReader, () => undefined);
   }, []);
   useEffect(() => {
-    if (wanted && !reader) prepare();
+    if (!wanted || reader) return;
+    prepare();
+    const retry = setInterval(prepare, RETRY_MS);
+    return () => clearInterval(retry);
   }, [wanted, reader, prepare]);
   return { reader, prepare };
 };

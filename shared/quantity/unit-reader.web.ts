@@ -8,6 +8,8 @@ export const loadUnits = (): Promise<void> => {
   loading ??= import('mathjs').then(({ create, unitDependencies }) => {
     unitOf = create({ ...unitDependencies }).unit as (text: string) => Unit;
   });
+  // A script that did not come may be asked for again.
+  loading.catch(() => (loading = undefined));
   return loading;
 };
 

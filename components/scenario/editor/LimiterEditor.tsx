@@ -3,7 +3,7 @@ import { View } from 'react-native';
 
 import { Button } from '@/components/ui/Button';
 import { Text } from '@/components/ui/Text';
-import { draftOf, listAt, nodeAt, type Draft, type DraftNode } from '@/hooks/scenario/draft-tree';
+import { listAt, nodeAt, type Draft, type DraftNode } from '@/hooks/scenario/draft-tree';
 import type { PartSummary } from '@/shared/contracts/part';
 
 import { BypassEditor } from './BypassEditor';
@@ -39,17 +39,15 @@ const PartHead = ({ base, onChange }: { base: string; onChange: () => void }) =>
 };
 
 const NoLimiter = ({ onChoose }: { onChoose: () => void }) => {
-  const { edit, scenario } = useEditor();
+  const { edit } = useEditor();
   return (
     <Section title="Limiter">
       <Text tone="quiet">The path has no limiter: only the source holds the inrush back.</Text>
       <BlockButton label="Choose from the library" onPress={onChoose} />
-      <BlockButton label="Type the figures" onPress={() => edit('limiter', [...draftList(scenario), { part: BLANK_PART }])} />
+      <BlockButton label="Type the figures" onPress={() => edit('limiter', [{ part: BLANK_PART }])} />
     </Section>
   );
 };
-
-const draftList = (scenario: Parameters<typeof draftOf>[0]): readonly DraftNode[] => listAt(draftOf(scenario), 'limiter');
 
 const SecondElement = ({ onAdd }: { onAdd: () => void }) => {
   const { draft } = useEditor();
@@ -65,12 +63,21 @@ export const LimiterEditor = ({ index }: { index: number }) => {
   const base = `limiter.${index}`;
   const [typed, setTyped] = useState(() => nodeAt(draft, `${base}.part.libraryId`) === undefined);
   const choose = (summary: PartSummary) => {
-    if (choosingFor !== null) edit(choosingFor < elements.length ? `limiter.${choosingFor}.part` : `limiter.${choosingFor}`, choosingFor < elements.length ? fromLibrary(summary) : { part: fromLibrary(summary) });
+    const part = fromLibrary(summary);
+    if (choosingFor === null) return;
+    if (choosingFor < elements.length) edit(`limiter.${choosingFor}.part`, part);
+    else edit(`limiter.${choosingFor}`, { part });
     setTyped(false);
     setChoosingFor(null);
   };
   const dialog = <PartDialog open={choosingFor !== null} current={nodeAt(draft, `${base}.part.libraryId`)} onClose={() => setChoosingFor(null)} onChoose={choose} />;
-  if (elements[index] === undefined) return <>{<NoLimiter onChoose={() => setChoosingFor(0)} />}{dialog}</>;
+  if (elements[index] === undefined)
+    return (
+      <>
+        <NoLimiter onChoose={() => setChoosingFor(0)} />
+        {dialog}
+      </>
+    );
   return (
     <View style={{ gap: 14 }}>
       <Section title={elements.length > 1 ? `Limiter ${index + 1} of ${elements.length}` : 'Limiter'}>
