@@ -28,6 +28,8 @@ export interface Settings {
   clock?: Clock;
   /** Another file may stand in for the engine in a test. */
   simulationWorker?: string;
+  /** ms; half a minute where absent. */
+  simulationTimeLimit?: number;
 }
 
 export interface Composed {
@@ -44,7 +46,7 @@ const SIMULATION_THREADS = 2;
 const MOST_WAITING_RUNS = 16;
 
 /** Puts the parts of the server together; the only place where they meet. */
-export const compose = ({ database, sessionSecret, staticDir, log, clock = () => new Date(), simulationWorker }: Settings): Composed => {
+export const compose = ({ database, sessionSecret, staticDir, log, clock = () => new Date(), simulationWorker, simulationTimeLimit }: Settings): Composed => {
   const passwords = new Passwords();
   const simulations = new SimulationService(
     new WorkerPool<SimulationTask, Simulated>({
@@ -52,6 +54,7 @@ export const compose = ({ database, sessionSecret, staticDir, log, clock = () =>
       threads: SIMULATION_THREADS,
       mostWaiting: MOST_WAITING_RUNS,
     }),
+    simulationTimeLimit,
   );
   const verdicts = new VerdictFiller(database, simulations, log);
   const sessions = new SessionService(database, sessionSecret, clock, log);

@@ -2,10 +2,14 @@ import type { Logger } from 'pino';
 import { type DataSource, In, IsNull, Not } from 'typeorm';
 
 import { isDatabaseUnavailable } from '../database/availability';
+import { ProblemError } from '../http/problem-error';
 import type { SimulationService } from '../simulations/simulation-service';
 import { ScenarioRow } from './scenario-entity';
 
-const PAUSE_WITHOUT_DATABASE = 2000;
+const PAUSE = 2000;
+
+/** What passes by itself: the database is away, or people's own runs fill the queue. */
+const isPassing = (error: unknown): boolean => isDatabaseUnavailable(error) || (error instanceof ProblemError && error.code === 'busy');
 
 /**
  * Computes the verdict of every saved draft, one after the other, behind the answers: a save is
@@ -55,10 +59,10 @@ export class VerdictFiller {
       while (more && !this.closed) more = await this.fillOne();
     } catch (error) {
       if (this.closed) return;
-      this.log.error({ err: error }, 'verdicts wait');
-      if (!isDatabaseUnavailable(error)) return;
+      this.log.warn({ err: error }, 'verdicts wait');
+      if (!isPassing(error)) return;
       this.wanted = true;
-      await new Promise((resolve) => setTimeout(resolve, PAUSE_WITHOUT_DATABASE).unref());
+      await new Promise((resolve) => setTimeout(resolve, PAUSE).unref());
     }
   }
 
@@ -72,7 +76,7 @@ export class VerdictFiller {
       // A save in the meantime has raised the version; its own verdict follows.
       await this.scenarios.update({ id: row.id, version: row.version }, { verdict: assessment.verdict, closest, engineVersion: assessment.engineVersion });
     } catch (error) {
-      if (isDatabaseUnavailable(error)) throw error;
+      if (isPassing(error)) throw error;
       if (!this.closed) this.log.error({ err: error, scenarioId: row.id, version: row.version }, 'a verdict could not be computed');
       this.failed.add(row.id);
     }

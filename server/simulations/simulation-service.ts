@@ -1,5 +1,6 @@
 import type { Simulated } from '../../shared/contracts/simulation';
 import type { Scenario } from '../../shared/model/scenario';
+import { ProblemError } from '../http/problem-error';
 import type { WorkerPool } from '../worker-pool';
 import type { SimulationTask } from './simulation-worker';
 import { WARM_UP_SCENARIO } from './warm-up-scenario';
@@ -13,7 +14,10 @@ export type SimulationPool = WorkerPool<SimulationTask, Simulated>;
 
 /** Runs the engine in threads, so that the thread that answers requests stays free. */
 export class SimulationService {
-  constructor(private readonly pool: SimulationPool) {}
+  constructor(
+    private readonly pool: SimulationPool,
+    private readonly timeLimit = TIME_LIMIT,
+  ) {}
 
   /** Runs that wait for a thread. */
   get waiting(): number {
@@ -27,23 +31,34 @@ export class SimulationService {
 
   /**
    * @param signal of a client that may hang up: what waits is dropped at once, what runs is given a moment to end by itself
+   * @throws {ProblemError} when there was no answer within the time limit
    */
   async assess(scenario: Scenario, signal?: AbortSignal): Promise<Simulated> {
-    const begun = new SharedArrayBuffer(4);
+    const word = new SharedArrayBuffer(4);
+    const begun = () => Atomics.load(new Int32Array(word), 0) === 1;
     const stop = new AbortController();
-    const timers = [setTimeout(() => stop.abort(), TIME_LIMIT)];
+    const timers = [setTimeout(() => stop.abort(this.overdue(begun())), this.timeLimit)];
     const hangUp = () => {
-      if (Atomics.load(new Int32Array(begun), 0) === 0) stop.abort();
-      else timers.push(setTimeout(() => stop.abort(), LET_FINISH));
+      if (begun()) timers.push(setTimeout(() => stop.abort(), LET_FINISH));
+      else stop.abort();
     };
     if (signal?.aborted) hangUp();
     signal?.addEventListener('abort', hangUp, { once: true });
     try {
-      return await this.pool.run({ scenario, begun }, stop.signal);
+      return await this.pool.run({ scenario, begun: word }, stop.signal);
+    } catch (error) {
+      throw stop.signal.reason instanceof ProblemError ? stop.signal.reason : error;
     } finally {
       timers.forEach(clearTimeout);
       signal?.removeEventListener('abort', hangUp);
     }
+  }
+
+  private overdue(begun: boolean): ProblemError {
+    const seconds = this.timeLimit / 1000;
+    return begun
+      ? new ProblemError('internal', `The run took longer than ${seconds} s and was stopped. A shorter duration may help.`)
+      : new ProblemError('busy', `The run waited for ${seconds} s behind others and was dropped; try again in a moment.`);
   }
 
   async close(): Promise<void> {

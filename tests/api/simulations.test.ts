@@ -8,6 +8,8 @@ import { simulatedSchema } from '../../shared/contracts/simulation';
 import { ApiServer } from '../support/api-server';
 import { sampleScenario } from '../support/sample-scenario';
 
+const HELD_WORKER = join(__dirname, '..', 'support', 'held-worker.ts');
+
 describe('a run', () => {
   let server: ApiServer;
   let engineer: string;
@@ -42,12 +44,36 @@ describe('a run', () => {
   });
 });
 
+describe('a run that does not end', () => {
+  let server: ApiServer;
+  let folder: string;
+  beforeAll(async () => {
+    server = await ApiServer.start({ simulationWorker: HELD_WORKER, simulationTimeLimit: 500 });
+    folder = mkdtempSync(join(tmpdir(), 'tidegate-held-'));
+  });
+  afterAll(async () => {
+    await server.stop();
+    rmSync(folder, { recursive: true });
+  });
+
+  test('is stopped with a word on it, and its thread computes the next one', async () => {
+    const designer = await server.signIn(server.people.designer);
+    const held = join(folder, 'held');
+    const answer = await server.send('post', '/api/simulations', designer, { scenario: sampleScenario({ notes: held }) }).expect(500);
+    expect(answer.body).toMatchObject({ code: 'internal', detail: expect.stringContaining('longer than 0.5 s') });
+    const free = join(folder, 'free');
+    writeFileSync(`${free}.release`, '');
+    const next = Array.from({ length: 4 }, () => server.send('post', '/api/simulations', designer, { scenario: sampleScenario({ notes: free }) }));
+    expect((await Promise.all(next)).map(({ status }) => status)).toEqual([200, 200, 200, 200]);
+  });
+});
+
 describe('while the engine is at work', () => {
   let server: ApiServer;
   let token: string;
   let folder: string;
   beforeAll(async () => {
-    server = await ApiServer.start({ simulationWorker: join(__dirname, '..', 'support', 'held-worker.ts') });
+    server = await ApiServer.start({ simulationWorker: HELD_WORKER });
     const made = await server.send('post', '/api/tokens', await server.signIn(server.people.designer), { name: 'runs' }).expect(201);
     token = String(made.body.secret);
     folder = mkdtempSync(join(tmpdir(), 'tidegate-held-'));
