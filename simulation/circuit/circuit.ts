@@ -1,0 +1,168 @@
+import type { PathElement, PowerPath } from './path';
+
+/** Direction of conduction: 0 blocked or open, +1 and −1 through the bridge; without one always +1, current both ways. */
+export type Conduction = -1 | 0 | 1;
+
+/** V; below it a constant-power load would ask for a current without bound. */
+const TINY = 1e-9;
+
+/**
+ * The power-up path as a set of differential equations with a discrete state.
+ * State vector: [v_C, T_1 … T_n, i], i the magnitude in the direction of conduction (A, V, K).
+ * Source of the equations: Kirchhoff's laws and the lumped heat balance C_th·dT/dt = i²R − δ(T − T_a).
+ */
+export class Circuit {
+  readonly count: number;
+  readonly size: number;
+  readonly bridge: boolean;
+  conduction: Conduction = 0;
+  /** False where the current is given by the voltages: L/R far below the accuracy asked for. */
+  inductive: boolean;
+  supplied = true;
+  loadSince: number | null = null;
+  faulted = false;
+  readonly closed: boolean[];
+  private readonly drop: number;
+  private readonly slope: number;
+  private readonly omega: number;
+
+  constructor(readonly path: PowerPath) {
+    const { rectifier, source } = path;
+    this.count = path.elements.length;
+    this.size = this.count + 2;
+    this.bridge = rectifier.kind === 'bridge';
+    this.drop = rectifier.kind === 'bridge' ? 2 * rectifier.forwardVoltage : 0;
+    this.slope = rectifier.kind === 'bridge' ? 2 * rectifier.slopeResistance : 0;
+    this.omega = 2 * Math.PI * source.frequency;
+    this.inductive = source.inductance > 0;
+    this.closed = path.elements.map(({ bypass }) => bypass?.behaviour === 'welded');
+  }
+
+  /** Source voltage, V; zero while the supply is off. */
+  sourceVoltage(t: number): number {
+    if (!this.supplied) return 0;
+    const { kind, amplitude, phase } = this.path.source;
+    return kind === 'dc' ? amplitude : amplitude * Math.sin(this.omega * t + phase);
+  }
+
+  sourceSlope(t: number): number {
+    const { kind, amplitude, phase } = this.path.source;
+    return kind === 'dc' || !this.supplied ? 0 : amplitude * this.omega * Math.cos(this.omega * t + phase);
+  }
+
+  /** Resistance that the line current meets in one element, contact included, Ω. */
+  private lineResistance(element: PathElement, index: number, temperature: number): number {
+    const body = element.law.resistance(temperature);
+    if (!this.closed[index]) return body;
+    const contact = element.bypass!.contactResistance;
+    return (body * contact) / (body + contact);
+  }
+
+  /** The limiter elements in series, contacts included, Ω. */
+  elementsResistance(y: Float64Array): number {
+    let sum = 0;
+    const { elements } = this.path;
+    for (let k = 0; k < this.count; k += 1) sum += this.lineResistance(elements[k]!, k, y[1 + k]!);
+    return sum;
+  }
+
+  /** Everything in series ahead of the bus, Ω. */
+  seriesResistance(y: Float64Array): number {
+    return this.path.source.resistance + this.slope + this.elementsResistance(y);
+  }
+
+  /** Heat of everything in series ahead of the bus: source, diodes, elements and contacts; W. */
+  seriesLoss(y: Float64Array, line: number): number {
+    return line * line * this.seriesResistance(y) + this.drop * Math.abs(line);
+  }
+
+  /** Energy held in the bulk capacitor and in the source inductance while its current is a state; J. */
+  storedEnergy(y: Float64Array): number {
+    const inductance = this.inductive && this.conduction !== 0 ? this.path.source.inductance : 0;
+    return 0.5 * this.path.bulk.capacitance * y[0]! ** 2 + 0.5 * inductance * y[this.count + 1]! ** 2;
+  }
+
+  /** Current through the body of an element for a line current, A. */
+  bodyCurrent(index: number, y: Float64Array, line: number): number {
+    if (!this.closed[index]) return line;
+    const element = this.path.elements[index]!;
+    const contact = element.bypass!.contactResistance;
+    return (line * contact) / (contact + element.law.resistance(y[1 + index]!));
+  }
+
+  bodyPower(index: number, y: Float64Array, line: number): number {
+    const current = this.bodyCurrent(index, y, line);
+    return current * current * this.path.elements[index]!.law.resistance(y[1 + index]!);
+  }
+
+  /** Conductances across the bus, S. */
+  busConductance(): number {
+    const { bulk, load, fault } = this.path;
+    let sum = bulk.bleeder === null ? 0 : 1 / bulk.bleeder;
+    if (load.kind === 'resistance') sum += 1 / load.resistance;
+    if (this.faulted && fault) sum += 1 / fault.resistance;
+    return sum;
+  }
+
+  /** Current that the running constant-power load draws, A. */
+  loadCurrent(capacitorVoltage: number, t: number): number {
+    const { load } = this.path;
+    if (load.kind !== 'constant-power' || this.loadSince === null) return 0;
+    const ramp = load.rampTime > 0 ? Math.min(1, Math.max(0, (t - this.loadSince) / load.rampTime)) : 1;
+    return (ramp * load.power) / Math.max(capacitorVoltage, load.clampVoltage, TINY);
+  }
+
+  busVoltage(y: Float64Array, line: number, t: number): number {
+    const { esr } = this.path.bulk;
+    return (y[0]! + esr * (line - this.loadCurrent(y[0]!, t))) / (1 + esr * this.busConductance());
+  }
+
+  /** Voltage that drives conduction in direction `s` at no current, V: conduction starts where it passes zero. */
+  drive(y: Float64Array, t: number, s: number): number {
+    return s * this.sourceVoltage(t) - this.drop - this.busVoltage(y, 0, t);
+  }
+
+  /** Line current in the direction of conduction, A. */
+  lineCurrent(y: Float64Array, t: number): number {
+    const s = this.conduction;
+    if (s === 0) return 0;
+    if (this.inductive) return y[this.count + 1]!;
+    const { esr } = this.path.bulk;
+    const bus = esr / (1 + esr * this.busConductance());
+    const current = this.drive(y, t, s) / (this.seriesResistance(y) + bus);
+    return this.bridge ? Math.max(0, current) : current;
+  }
+
+  /** Power from the source, W. */
+  sourcePower(y: Float64Array, t: number, line: number): number {
+    return this.conduction * this.sourceVoltage(t) * line;
+  }
+
+  /**
+   * Whether the current needs to be a state: not where L/R is far below both RC and 1/ω. A start onto a standing
+   * voltage needs its rise; a start from zero volts does not.
+   */
+  chooseReduction(y: Float64Array, hardStart: boolean): void {
+    const { source, bulk } = this.path;
+    const resistance = this.seriesResistance(y) + bulk.esr;
+    const slowest = Math.min(resistance * bulk.capacitance, this.omega > 0 ? 1 / this.omega : Infinity);
+    this.inductive = source.inductance > (hardStart ? 1e-4 : 1e-3) * resistance * slowest;
+  }
+
+  derivative = (dydt: Float64Array, y: Float64Array, t: number): void => {
+    const { source, bulk, elements, ambient } = this.path;
+    const line = this.lineCurrent(y, t);
+    const bus = this.busVoltage(y, line, t);
+    const capacitorCurrent = line - this.loadCurrent(y[0]!, t) - this.busConductance() * bus;
+    dydt[0] = capacitorCurrent / bulk.capacitance;
+    for (let k = 0; k < this.count; k += 1) {
+      const element = elements[k]!;
+      dydt[1 + k] = (this.bodyPower(k, y, line) - element.dissipation * (y[1 + k]! - ambient)) / element.heatCapacity;
+    }
+    const s = this.conduction;
+    dydt[this.count + 1] =
+      s !== 0 && this.inductive
+        ? (s * this.sourceVoltage(t) - this.seriesResistance(y) * line - this.drop - bus) / source.inductance
+        : 0;
+  };
+}

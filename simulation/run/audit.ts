@@ -1,0 +1,63 @@
+import type { Audit } from '../../shared/model/result';
+import { Circuit } from '../circuit/circuit';
+import type { Follow } from './follow';
+import { Periods } from './periods';
+import { Waveform } from './waveform';
+
+/** Relative residual up to which a run counts as clean. */
+const CLEAN = 5e-3;
+/** K; a soak further than this from the waveform at its end is not clean. */
+const CLEAN_TEMPERATURE = 0.3;
+/** Half periods of full waveform that the end of a soak is held against. */
+const STRETCH = 4;
+
+/** Heat taken up and given off against heat absorbed, each element by itself, relative to what it absorbed. */
+const elementResiduals = ({ path, wave, startTemperatures }: Follow): number[] =>
+  path.elements.map(({ heatCapacity }, k) => {
+    const [absorbed, given] = [wave.tally.body[k]!, wave.tally.given[k]!];
+    const stored = heatCapacity * (wave.y[1 + k]! - startTemperatures[k]!);
+    const own = Math.max(absorbed, Math.abs(stored), 1e-3 * heatCapacity);
+    return Math.abs(absorbed - given - stored) / own;
+  });
+
+/** A stretch of full waveform from the state at the end of the last soak, beside what the soak took it for. */
+const soakResidual = (run: Follow): Audit['soak'] => {
+  const { endCycle: cycle, path, circuit } = run;
+  if (!cycle || path.elements.length === 0) return null;
+  const twin = new Circuit({ ...path, source: { ...path.source, phase: 0, programme: [] } });
+  twin.loadSince = circuit.loadSince === null ? null : -Infinity;
+  twin.faulted = circuit.faulted;
+  circuit.closed.forEach((closed, k) => (twin.closed[k] = closed));
+  const y = Float64Array.from(run.wave.y);
+  y[0] = cycle.capacitorVoltage;
+  const spilling = path.source.kind === 'ac' && cycle.lineCurrent > 0;
+  y[circuit.size - 1] = spilling || path.source.kind === 'dc' ? cycle.lineCurrent : 0;
+  if (spilling) twin.conduction = -1;
+  if (path.source.kind === 'dc') twin.conduction = 1;
+  if (twin.conduction !== 0) twin.chooseReduction(y, false);
+  const wave = new Waveform(twin, { t: 0, y }, { tolerance: run.options.tolerance ?? 1e-5, budget: 400_000 }, () => [], () => undefined);
+  const length = new Periods(wave).length;
+  for (let k = 1; k <= STRETCH; k += 1) wave.run(k * length, () => false);
+  const span = STRETCH * length;
+  const rms = Math.sqrt(wave.tally.i2t / span);
+  const drift = path.elements.map(({ dissipation }, k) => (wave.tally.body[k]! / span - circuit.bodyPower(k, run.wave.y, cycle.rms)) / dissipation);
+  return {
+    temperature: Math.max(...drift.map(Math.abs)),
+    rmsCurrent: Math.abs(rms - cycle.rms) / Math.max(cycle.rms, 1e-6 * path.source.amplitude),
+  };
+};
+
+export const auditOf = (run: Follow): Audit => {
+  const elementEnergy = elementResiduals(run);
+  const { residual, energy } = run.sourceBalance;
+  const floor = 1e-9 * run.path.bulk.capacitance * run.path.source.amplitude ** 2;
+  const sourceEnergy = Math.abs(residual) / Math.max(energy, floor, 1e-12);
+  const soak = run.options.traces === false ? null : soakResidual(run);
+  const worstResidual = Math.max(0, sourceEnergy, soak?.rmsCurrent ?? 0, ...elementEnergy);
+  const notes = [
+    ...(run.pulses.expected === run.pulses.found ? [] : [`${run.pulses.expected - run.pulses.found} pulses were passed over`]),
+    ...(worstResidual < CLEAN ? [] : [`the largest residual is ${(100 * worstResidual).toPrecision(2)} %`]),
+    ...((soak?.temperature ?? 0) < CLEAN_TEMPERATURE ? [] : ['the soak and the waveform disagree on the final temperature']),
+  ];
+  return { clean: notes.length === 0, worstResidual, elementEnergy, sourceEnergy, pulses: { ...run.pulses }, soak, notes };
+};

@@ -1,0 +1,242 @@
+import type { RunEvent } from '../../shared/model/result';
+import { Circuit } from '../circuit/circuit';
+import type { PowerPath } from '../circuit/path';
+import { CycleMap } from './cycle-map';
+import { FirstPulse } from './first-pulse';
+import { Happenings } from './happenings';
+import { History } from './history';
+import type { RunOptions } from './options';
+import { Periods } from './periods';
+import { Soak, type SoakPoint } from './soak';
+import type { SteadyCycle } from './steady-cycle';
+import { Waveform } from './waveform';
+
+/** s; where the plot folds from the waveform to the soak. */
+export const FOLD = 0.1;
+const TOLERANCE = 1e-5;
+const SOAK_TOLERANCE = 1e-6;
+const BUDGET = 4_000_000;
+/** Load stops after which a hiccup counts as endless. */
+const HICCUPS = 8;
+/** Periods that must be free of known events for a soak to be worth its start, and that are waited after one failed. */
+const WORTHWHILE = 6;
+const PATIENCE = 10;
+/** Share of the amplitude by which the bus may miss the repeating cycle. */
+const SETTLED = 2e-3;
+
+/** Follows one path from switch-on through waveform and soak to its end. */
+export class Follow {
+  readonly circuit: Circuit;
+  readonly wave: Waveform;
+  readonly happenings: Happenings;
+  readonly periods: Periods;
+  readonly history: History;
+  readonly pulse: FirstPulse;
+  readonly soaked: { points: SoakPoint[]; offset: { i2t: number; source: number; energy: number[] } }[] = [];
+  readonly startTemperatures: number[];
+  readonly pulses = { expected: 0, found: 0 };
+  readonly sourceBalance = { residual: 0, energy: 0 };
+  /** Cycle at the end, where the run ended in a soak. */
+  endCycle: SteadyCycle | null = null;
+  lastMap: CycleMap | null = null;
+  soakSides = 0;
+  hiccups = false;
+  readonly hottest: number[];
+  bypass = { closedAt: null as number | null, voltage: null as number | null, peak: null as number | null };
+  underLoad = { start: null as number | null, lowest: Infinity, ended: false };
+  trip = { reference: 0, at: null as number | null, i2t: 0, energy: 0, from: 0, fromI2t: 0, fromEnergy: 0 };
+  private waitUntil = 0;
+  private known = 0;
+
+  constructor(
+    readonly path: PowerPath,
+    readonly options: RunOptions,
+  ) {
+    this.circuit = new Circuit(path);
+    this.startTemperatures = [...(options.start?.temperatures ?? path.elements.map(() => path.ambient))];
+    const y = Float64Array.of(options.start?.busVoltage ?? path.bulk.initialVoltage, ...this.startTemperatures, 0);
+    this.hottest = [...this.startTemperatures];
+    this.happenings = new Happenings(this.circuit, this.startTemperatures);
+    const limits = { tolerance: options.tolerance ?? TOLERANCE, budget: BUDGET };
+    this.wave = new Waveform(this.circuit, { t: 0, y }, limits, this.happenings.watches, this.onStep);
+    this.happenings.begin(this.wave, options.start);
+    this.periods = new Periods(this.wave);
+    this.history = new History(this.wave);
+    this.pulse = new FirstPulse(this.wave);
+    this.run();
+  }
+
+  private run(): void {
+    const { wave, periods, options } = this;
+    while (wave.t < options.duration - 1e-9 && !wave.stoppedAs && !this.finished()) {
+      const boundary = this.circuit.supplied ? periods.next(wave.t) : Math.max(periods.next(wave.t), wave.nextScheduled());
+      this.balanced(() => wave.run(Math.min(boundary, options.duration), () => this.finished()));
+      if (wave.t >= boundary - 1e-12 || wave.t >= options.duration - 1e-9) periods.cut();
+      if (!options.waveformOnly && this.readyToSoak()) this.soak();
+    }
+  }
+
+  private finished(): boolean {
+    const { stopAt } = this.options;
+    if (this.hiccups) return true;
+    if (stopAt === 'first-pulse') return this.pulse.ended;
+    return stopAt === 'charged' && this.isCharged();
+  }
+
+  private isCharged(): boolean {
+    const rows = this.periods.rows;
+    const [before, last] = [rows[rows.length - 2], rows[rows.length - 1]];
+    if (!before || !last) return false;
+    const rise = last.highestBus - before.highestBus;
+    return this.pulse.ended && rise < 3e-3 * this.path.source.amplitude && last.highestBus > 0.3 * this.path.source.amplitude;
+  }
+
+  /** Runs a stretch of waveform and adds up how far source energy, heat and stored energy disagree. */
+  private balanced(stretch: () => void): void {
+    const { wave, circuit, sourceBalance } = this;
+    const [source, dissipated, stored] = [wave.tally.source, wave.tally.dissipated, circuit.storedEnergy(wave.y)];
+    stretch();
+    const given = wave.tally.source - source;
+    sourceBalance.energy += Math.abs(given);
+    sourceBalance.residual += given - (wave.tally.dissipated - dissipated) - (circuit.storedEnergy(wave.y) - stored);
+  }
+
+  private onStep = (wave: Waveform, from: number, h: number): void => {
+    const { pulse, history, periods, happenings } = this;
+    pulse.add(from, h);
+    periods.add();
+    if (wave.t <= FOLD || !pulse.ended) history.add(from, h);
+    for (let k = 0; k < this.hottest.length; k += 1) this.hottest[k] = Math.max(this.hottest[k]!, wave.y[1 + k]!);
+    this.countPulse();
+    this.followEvents();
+    this.followBypass();
+    this.followLoad();
+    this.followTrip();
+    happenings.openIfBlocked();
+  };
+
+  private countPulse(): void {
+    const { circuit, wave } = this;
+    const { kind, amplitude, frequency } = this.path.source;
+    if (kind === 'dc' || !circuit.supplied) return;
+    if (Math.abs(circuit.sourceSlope(wave.t)) > 1e-6 * amplitude * frequency) return;
+    const conducts = circuit.conduction !== 0;
+    const sign = circuit.sourceVoltage(wave.t) < 0 ? -1 : 1;
+    if (conducts || circuit.drive(wave.y, wave.t, sign) > 1e-3 * amplitude) this.pulses.expected += 1;
+    if (conducts) this.pulses.found += 1;
+  }
+
+  private followEvents(): void {
+    const { events } = this.happenings;
+    for (; this.known < events.length; this.known += 1) {
+      const event = events[this.known]!;
+      const { wave } = this;
+      if (event.kind === 'contact-closes' && this.bypass.closedAt === null) {
+        const line = Math.abs(wave.tally.end.line);
+        this.bypass = { closedAt: event.at, voltage: line * this.path.elements[event.element!]!.law.resistance(wave.y[1 + event.element!]!), peak: 0 };
+      }
+      if (event.kind === 'load-starts' && this.underLoad.start === null) this.underLoad.start = wave.tally.end.bus;
+      if (event.kind === 'load-stops') {
+        this.underLoad.ended = true;
+        this.underLoad.lowest = Math.min(this.underLoad.lowest, wave.tally.end.bus);
+        this.hiccups = events.filter((one) => one.kind === 'load-stops').length >= HICCUPS && this.circuit.supplied;
+      }
+      if (event.kind === 'fault-begins')
+        Object.assign(this.trip, { from: event.at, fromI2t: wave.tally.i2t, fromEnergy: wave.tally.body[0] ?? 0, reference: 0 });
+      if (event.kind === 'trips' && this.trip.at === null && !this.path.fault) this.noteTrip();
+    }
+  }
+
+  private noteTrip(): void {
+    const { tally, t } = this.wave;
+    Object.assign(this.trip, { at: t, i2t: tally.i2t - this.trip.fromI2t, energy: (tally.body[0] ?? 0) - this.trip.fromEnergy });
+  }
+
+  private followBypass(): void {
+    const { bypass, wave, periods } = this;
+    if (bypass.closedAt === null || wave.t > bypass.closedAt + Math.max(2 * periods.length, 0.05)) return;
+    const { start, middle, end } = wave.tally;
+    bypass.peak = Math.max(bypass.peak!, Math.abs(start.line), Math.abs(middle.line), Math.abs(end.line));
+  }
+
+  private followLoad(): void {
+    if (this.circuit.loadSince === null || this.underLoad.ended) return;
+    this.underLoad.lowest = Math.min(this.underLoad.lowest, this.wave.tally.end.bus);
+  }
+
+  /** On a step fault a PTC has tripped when the current is below half of what it was when the fault began. */
+  private followTrip(): void {
+    const { trip, path, wave, circuit } = this;
+    if (!circuit.faulted || trip.at !== null || !path.elements.some(({ kind }) => kind === 'polymer-ptc')) return;
+    const rows = this.periods.rows;
+    const line = path.source.kind === 'dc' ? Math.abs(wave.tally.end.line) : (rows[rows.length - 1]?.start ?? -1) >= trip.from ? rows[rows.length - 1]!.rms : 0;
+    trip.reference = Math.max(trip.reference, line);
+    if (line > 0 && line < trip.reference / 2) this.noteTrip();
+  }
+
+  private readyToSoak(): boolean {
+    const { wave, periods, circuit, happenings, options } = this;
+    const soon = wave.t + WORTHWHILE * periods.length;
+    if (!circuit.supplied || happenings.supplyGoesOff || wave.t < this.waitUntil || !periods.repeats) return false;
+    return soon < Math.min(wave.nextScheduled(), options.duration) && this.isCalm();
+  }
+
+  private isCalm(): boolean {
+    const rows = this.periods.rows;
+    const [before, last] = [rows[rows.length - 2]!, rows[rows.length - 1]!];
+    return this.path.elements.every(({ law }, k) => {
+      const change = Math.log(law.resistance(last.temperature[k]!) / law.resistance(before.temperature[k]!));
+      return Math.abs(change) < 0.01;
+    });
+  }
+
+  private soak(): void {
+    const { wave, circuit, periods, happenings, options, path } = this;
+    const temperatures = Float64Array.from(wave.y.subarray(1, 1 + circuit.count));
+    const loadRuns = circuit.loadSince !== null;
+    const map = new CycleMap({ path, loadRuns, faulted: circuit.faulted, tolerance: options.tolerance ?? TOLERANCE }, circuit.elementsResistance(wave.y), wave.y[0]!);
+    const cycle = map.at(circuit.elementsResistance(wave.y));
+    const amplitude = path.source.amplitude;
+    this.waitUntil = wave.t + PATIENCE * periods.length;
+    if (!cycle || Math.abs(cycle.capacitorVoltage - wave.y[0]!) > SETTLED * amplitude) return;
+    const to = Math.min(wave.nextScheduled(), options.duration);
+    const whole = path.source.kind === 'dc' ? to : periods.next(to) - periods.length;
+    const { load } = path;
+    const result = new Soak(circuit, map, temperatures).run({
+      from: wave.t, to: whole, period: periods.length, tolerance: SOAK_TOLERANCE,
+      startsAt: load.kind === 'constant-power' && !loadRuns && !happenings.loadPending ? load.startVoltage : null,
+      stopsAt: load.kind === 'constant-power' && loadRuns ? load.stopVoltage : null,
+    });
+    this.soakSides += result.sides;
+    if (!result.cycle || result.points.length === 0) return;
+    this.resume(result.cycle, result, map);
+  }
+
+  private resume(cycle: SteadyCycle, result: ReturnType<Soak['run']>, map: CycleMap): void {
+    const { wave, circuit, periods, options } = this;
+    const { tally, y } = wave;
+    this.soaked.push({ points: result.points, offset: { i2t: tally.i2t, source: tally.source, energy: Array.from(tally.body) } });
+    wave.jump(result.t);
+    y[0] = cycle.capacitorVoltage;
+    y.set(result.temperatures, 1);
+    const flowing = cycle.lineCurrent > 0 && this.path.source.kind === 'ac';
+    if (this.path.source.kind === 'ac' && !flowing) circuit.conduction = 0;
+    y[circuit.size - 1] = circuit.conduction === 0 ? 0 : cycle.lineCurrent;
+    tally.i2t += result.i2t;
+    tally.source += result.source;
+    for (let k = 0; k < circuit.count; k += 1) {
+      tally.body[k]! += result.body[k]!;
+      tally.given[k]! += result.given[k]!;
+      for (const { temperature } of result.points) this.hottest[k] = Math.max(this.hottest[k]!, temperature[k]!);
+    }
+    periods.restart();
+    this.lastMap = map;
+    this.endCycle = result.t >= options.duration - 2 * periods.length ? cycle : null;
+    this.waitUntil = wave.t + 4 * periods.length;
+  }
+
+  /** All events in order of time; the end of charging among them. */
+  eventsInOrder(): RunEvent[] {
+    return [...this.happenings.events].sort((a, b) => a.at - b.at);
+  }
+}

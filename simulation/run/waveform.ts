@@ -1,0 +1,210 @@
+import type { Circuit, Conduction } from '../circuit/circuit';
+import { DoubledStep } from '../solver/doubled-step';
+import { rootBetween } from '../solver/root';
+import { Tally } from './tally';
+
+/** Something that happens at a known time. */
+export interface Scheduled {
+  at: number;
+  apply: () => void;
+}
+
+/** Something that happens where a value passes zero in the given direction. */
+export interface Watch {
+  value: (y: Float64Array, t: number) => number;
+  rising: boolean;
+  apply: () => void;
+}
+
+export interface WaveformOptions {
+  tolerance: number;
+  /** Right-hand sides allowed. */
+  budget: number;
+}
+
+/** Told of every accepted step. */
+export type OnStep = (wave: Waveform, from: number, h: number) => void;
+
+/** s; two instants closer than this are one. */
+const INSTANT = 1e-12;
+const SIDES_PER_STEP = 12;
+
+/** Event-located integration of the circuit on the waveform scale. */
+export class Waveform {
+  t: number;
+  readonly y: Float64Array;
+  readonly middle: Float64Array;
+  readonly before: Float64Array;
+  sides = 0;
+  everInductive = false;
+  stoppedAs: 'step-too-small' | 'step-budget' | null = null;
+  readonly tally: Tally;
+  private h: number;
+  private readonly stepper: DoubledStep;
+  private readonly floor: Float64Array;
+  private readonly scheduled: Scheduled[] = [];
+
+  constructor(
+    readonly circuit: Circuit,
+    start: { t: number; y: Float64Array },
+    private readonly options: WaveformOptions,
+    private readonly watches: () => readonly Watch[],
+    private readonly onStep: OnStep,
+  ) {
+    const { amplitude, resistance, frequency } = circuit.path.source;
+    this.t = start.t;
+    this.y = Float64Array.from(start.y);
+    this.middle = new Float64Array(circuit.size);
+    this.before = new Float64Array(circuit.size);
+    this.stepper = new DoubledStep(circuit.size, circuit.derivative);
+    this.tally = new Tally(circuit);
+    this.floor = new Float64Array(circuit.size).fill(30);
+    this.floor[0] = 0.1 * amplitude;
+    this.floor[circuit.size - 1] = (0.02 * amplitude) / Math.max(resistance, circuit.seriesResistance(start.y));
+    this.h = frequency > 0 ? 1e-3 / frequency : 1e-6;
+  }
+
+  schedule(one: Scheduled): void {
+    this.scheduled.push(one);
+    this.scheduled.sort((a, b) => a.at - b.at);
+  }
+
+  unschedule(one: Scheduled | null): void {
+    const index = one ? this.scheduled.indexOf(one) : -1;
+    if (index >= 0) this.scheduled.splice(index, 1);
+  }
+
+  /** Moves on to a later time after a soak; the state is set by the caller. */
+  jump(t: number): void {
+    this.t = t;
+    const { frequency } = this.circuit.path.source;
+    this.h = frequency > 0 ? 1e-3 / frequency : 1e-5;
+  }
+
+  nextScheduled(): number {
+    return this.scheduled[0]?.at ?? Infinity;
+  }
+
+  /** Integrates until `end`, or until a step or an event calls for a stop. */
+  run(end: number, shouldStop: () => boolean): void {
+    while (this.t < end - INSTANT && !this.stoppedAs && !shouldStop()) {
+      this.settleConduction();
+      this.advance(Math.min(end, this.nextScheduled(), this.nextQuarter()));
+      while (this.nextScheduled() <= this.t + INSTANT) this.scheduled.shift()!.apply();
+    }
+  }
+
+  /** The next zero or crest of the source voltage: no step spans one, so that no pulse is jumped. */
+  private nextQuarter(): number {
+    const { kind, frequency, phase } = this.circuit.path.source;
+    if (kind === 'dc' || !this.circuit.supplied) return Infinity;
+    const quarters = 4 * frequency * this.t + (2 * phase) / Math.PI;
+    return (Math.floor(quarters + 1e-7) + 1 - (2 * phase) / Math.PI) / (4 * frequency);
+  }
+
+  /** Starts conduction that the voltages ask for at this very instant. */
+  private settleConduction(): void {
+    const { circuit, y, t } = this;
+    if (circuit.conduction !== 0 || !circuit.supplied) return;
+    const s: Conduction = circuit.sourceVoltage(t) < 0 ? -1 : 1;
+    const slope = s * circuit.sourceSlope(t);
+    const drive = circuit.drive(y, t, s);
+    const nearly = 1e-9 * circuit.path.source.amplitude;
+    if (!circuit.bridge || drive > nearly || (drive > -nearly && slope > 0)) this.conduct(s, drive);
+  }
+
+  private conduct(s: Conduction, drive: number): void {
+    const { circuit, y } = this;
+    circuit.conduction = s;
+    y[circuit.size - 1] = 0;
+    circuit.chooseReduction(y, drive > 1e-3 * circuit.path.source.amplitude);
+    this.everInductive ||= circuit.inductive;
+  }
+
+  private advance(limit: number): void {
+    const { y, stepper, before } = this;
+    const room = limit - this.t;
+    let h = Math.min(this.h, room);
+    before.set(y);
+    for (;;) {
+      if (this.sides > this.options.budget) return this.stop('step-budget');
+      stepper.take(before, this.t, h);
+      this.sides += SIDES_PER_STEP;
+      const error = stepper.error(this.floor, this.options.tolerance);
+      if (error <= 1) {
+        this.h = h * Math.min(3, Math.max(1, 0.9 * error ** -0.2));
+        break;
+      }
+      h *= Math.max(0.1, 0.9 * error ** -0.25);
+      if (!(h > 1e-14 * Math.max(1, this.t))) return this.stop('step-too-small');
+    }
+    const found = this.earliestEvent(h);
+    if (found) {
+      h = found.at;
+      stepper.take(before, this.t, h);
+      this.sides += SIDES_PER_STEP;
+    }
+    stepper.extrapolate();
+    this.accept(h, h >= room - INSTANT ? limit : this.t + h);
+    if (found) for (const apply of found.all) apply();
+  }
+
+  private stop(reason: 'step-too-small' | 'step-budget'): void {
+    this.stoppedAs = reason;
+  }
+
+  private accept(h: number, to: number): void {
+    const { y, before, middle, stepper, tally } = this;
+    y.set(stepper.end);
+    middle.set(stepper.middle);
+    const from = this.t;
+    tally.add(h, before, middle, y, from);
+    this.t = to;
+    this.onStep(this, from, h);
+  }
+
+  /** Watches that pass zero within the step; the earliest of them, or several at one instant. */
+  private earliestEvent(h: number): { at: number; all: (() => void)[] } | null {
+    const crossed = [...this.conductionWatch(), ...this.watches()].flatMap((watch) => {
+      const sign = watch.rising ? 1 : -1;
+      if (sign * watch.value(this.before, this.t) >= 0) return [];
+      if (sign * watch.value(this.stepper.middle, this.t + h / 2) >= 0) return [{ watch, low: 0, high: h / 2 }];
+      return sign * watch.value(this.stepper.end, this.t + h) >= 0 ? [{ watch, low: h / 2, high: h }] : [];
+    });
+    if (crossed.length === 0) return null;
+    const roots = crossed.map(({ watch, low, high }) => ({ watch, at: this.locate(watch, low, high) }));
+    const at = Math.min(...roots.map((one) => one.at));
+    return { at, all: roots.filter((one) => one.at <= at + INSTANT).map((one) => one.watch.apply) };
+  }
+
+  private locate({ value }: Watch, low: number, high: number): number {
+    const { before, t, stepper } = this;
+    const passes = (h: number): number => {
+      if (h <= 0) return value(before, t);
+      this.sides += 4;
+      return value(stepper.single(before, t, h), t + h);
+    };
+    return rootBetween(passes, low, high, Math.max(1e-13, 1e-8 * high));
+  }
+
+  private conductionWatch(): Watch[] {
+    const { circuit } = this;
+    if (!circuit.bridge || !circuit.supplied) return [];
+    const s = circuit.conduction;
+    if (s === 0) {
+      const sign: Conduction = circuit.sourceVoltage(this.t) + 1e-3 * circuit.sourceSlope(this.t) / (2 * Math.PI * (circuit.path.source.frequency || 1)) < 0 ? -1 : 1;
+      return [{ value: (y, t) => circuit.drive(y, t, sign), rising: true, apply: () => this.conduct(sign, 0) }];
+    }
+    const last = circuit.size - 1;
+    return [
+      {
+        value: circuit.inductive ? (y) => y[last]! : (y, t) => circuit.drive(y, t, s),
+        rising: false,
+        apply: () => {
+          circuit.conduction = 0;
+          this.y[last] = 0;
+        },
+      },
+    ];
+  }
+}
