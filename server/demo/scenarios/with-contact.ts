@@ -29,7 +29,7 @@ export const HOT_RESTART: DemoScenario = {
     rectifier: bridge('250 A', '310 A²s'),
     bulk: { capacitance: '470 µF ±20 %', esr: '120 mΩ', bleeder: '150k', atLowAmbient: { capacitanceFactor: '85 %', esrFactor: 4 } },
     load: { kind: 'constant-power', power: '300 W', startVoltage: '220 V', stopVoltage: '150 V', startDelay: '600 ms', rampTime: '20 ms' },
-    ambient: { nominal: '25 °C', min: '0 °C', max: '50 °C' },
+    ambient: { nominal: '25 °C', min: '0 °C', max: '40 °C' },
     limits: { peakCurrent: '100 A peak', limiterLoss: '3 W' },
   },
 };

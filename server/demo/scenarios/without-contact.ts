@@ -13,7 +13,7 @@ export const COLD_START: DemoScenario = {
     bulk: { capacitance: '100 µF ±20 %', esr: '400 mΩ', atLowAmbient: { capacitanceFactor: '60 %', esrFactor: 15 } },
     load: { kind: 'constant-power', power: '75 W', startVoltage: '170 V', stopVoltage: '120 V', startDelay: '100 ms', rampTime: '20 ms' },
     ambient: { nominal: '10 °C', min: '-40 °C', max: '45 °C' },
-    limits: { peakCurrent: '60 A peak', limiterLoss: '4 W' },
+    limits: { peakCurrent: '100 A peak' },
   },
 };
 
