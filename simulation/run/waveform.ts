@@ -87,11 +87,29 @@ export class Waveform {
 
   /** Integrates until `end`, or until a step or an event calls for a stop. */
   run(end: number, shouldStop: () => boolean): void {
+    this.reconsiderInductance();
+    this.applyDue();
     while (this.t < end - INSTANT && !this.stoppedAs && !shouldStop()) {
       this.settleConduction();
       this.advance(Math.min(end, this.nextScheduled(), this.nextQuarter()));
-      while (this.nextScheduled() <= this.t + INSTANT) this.scheduled.shift()!.apply();
+      this.applyDue();
     }
+  }
+
+  private applyDue(): void {
+    while (this.nextScheduled() <= this.t + INSTANT) this.scheduled.shift()!.apply();
+  }
+
+  /** R(T) and contacts move under a standing current: whether that current must be a state is asked anew. */
+  private reconsiderInductance(): void {
+    const { circuit, y, t, tally } = this;
+    if (circuit.conduction === 0) return;
+    const [line, held, was] = [circuit.lineCurrent(y, t), circuit.storedEnergy(y), circuit.inductive];
+    circuit.chooseReduction(y, false);
+    if (circuit.inductive === was) return;
+    y[circuit.size - 1] = line;
+    this.everInductive ||= circuit.inductive;
+    tally.dissipated += held - circuit.storedEnergy(y);
   }
 
   /** The next zero or crest of the source voltage: no step spans one, so that no pulse is jumped. */
@@ -124,17 +142,21 @@ export class Waveform {
   private advance(limit: number): void {
     const { y, stepper, before } = this;
     const room = limit - this.t;
-    let h = Math.min(this.h, room);
+    const wanted = this.h;
+    let h = Math.min(wanted, room);
     before.set(y);
+    let cut = h < wanted;
     for (;;) {
       if (this.sides > this.options.budget) return this.stop('step-budget');
       stepper.take(before, this.t, h);
       this.sides += SIDES_PER_STEP;
       const error = stepper.error(this.floor, this.options.tolerance);
       if (error <= 1) {
-        this.h = h * Math.min(3, Math.max(1, 0.9 * error ** -0.2));
+        // A step that only the limit cut short says nothing against a long one.
+        this.h = Math.max(cut ? wanted : 0, h * Math.min(3, Math.max(1, 0.9 * error ** -0.2)));
         break;
       }
+      cut = false;
       h *= Math.max(0.1, 0.9 * error ** -0.25);
       if (!(h > 1e-14 * Math.max(1, this.t))) return this.stop('step-too-small');
     }

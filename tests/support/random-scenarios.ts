@@ -7,9 +7,12 @@ import { realisticParts, type Span } from './random-parts';
 /** One in this many draws of a quantity comes from the schema's whole range, not the usual one. */
 const USUAL_WEIGHT = 12;
 
-/** Evenly over the logarithm, rounded to what a person would type. */
+const STEPS = 100_000;
+/** Evenly over the logarithm, without the library's bias to ends and small floats; rounded to what a person would type. */
 const logarithmic = ([low, high]: Span): Arbitrary<number> =>
-  fc.double({ min: Math.log(low), max: Math.log(high), noNaN: true }).map((exponent) => Number(Math.min(high, Math.max(low, Math.exp(exponent))).toPrecision(4)));
+  fc.noBias(fc.integer({ min: 0, max: STEPS })).map((step) => Math.min(high, Math.max(low, Number((low * (high / low) ** (step / STEPS)).toPrecision(4)))));
+
+const share = (low: number, high: number): Arbitrary<number> => fc.noBias(fc.integer({ min: 0, max: 100 })).map((step) => low + ((high - low) * step) / 100);
 
 const drawn = (usual: Span, whole: Span): Arbitrary<number> =>
   fc.oneof({ weight: USUAL_WEIGHT, arbitrary: logarithmic(usual) }, { weight: 1, arbitrary: logarithmic(whole) });
@@ -95,7 +98,7 @@ const load = (crest: number) =>
     {
       weight: 4,
       arbitrary: fc
-        .record({ power: drawn([2, 500], [1e-3, 100e3]), start: fc.double({ min: 0.3, max: 1.1, noNaN: true }), stop: fc.option(fc.double({ min: 0.3, max: 0.95, noNaN: true }), { nil: undefined }), startDelay: orZero(drawn([0.01, 0.5], [1e-4, 60])), rampTime: orZero(drawn([1e-3, 0.1], [1e-4, 60])) })
+        .record({ power: drawn([2, 500], [1e-3, 100e3]), start: share(0.3, 1.1), stop: fc.option(share(0.3, 0.95), { nil: undefined }), startDelay: orZero(drawn([0.01, 0.5], [1e-4, 60])), rampTime: orZero(drawn([1e-3, 0.1], [1e-4, 60])) })
         .map(({ start, stop, ...rest }) => {
           const startVoltage = Math.min(1500, Math.max(0.2, Number((start * crest).toPrecision(4))));
           return { kind: 'constant-power' as const, startVoltage, ...(stop !== undefined && { stopVoltage: startVoltage * stop }), ...rest };
@@ -106,7 +109,7 @@ const load = (crest: number) =>
   );
 
 const fault = (duration: number) =>
-  fc.record({ kind: fc.constant('resistance' as const), at: fc.double({ min: 0, max: 0.9, noNaN: true }).map((share) => share * duration), resistance: drawn([0.05, 50], [1e-4, 1e6]) });
+  fc.record({ kind: fc.constant('resistance' as const), at: fc.integer({ min: 0, max: 18 }).map((share) => (share / 20) * duration), resistance: drawn([0.05, 50], [1e-4, 1e6]) });
 
 const ambient = fc.tuple(fc.integer({ min: -40, max: 85 }), fc.constantFrom(0, 15, 40)).map(([celsius, halfWidth]) => ({ nominal: celsius + 273.15, tolerance: halfWidth }));
 
