@@ -8,6 +8,8 @@ import { Waveform } from './waveform';
 const CLEAN = 5e-3;
 /** K; a soak further than this from the waveform at its end is not clean. */
 const CLEAN_TEMPERATURE = 0.3;
+/** Share of the highest half-period current below which a disagreement on the steady one moves nothing. */
+const NEGLIGIBLE = 0.01;
 /** Half periods of full waveform that the end of a soak is held against. */
 const STRETCH = 4;
 
@@ -39,11 +41,12 @@ const soakResidual = (run: Follow): Audit['soak'] => {
   const length = new Periods(wave).length;
   for (let k = 1; k <= STRETCH; k += 1) wave.run(k * length, () => false);
   const span = STRETCH * length;
+  const highest = Math.max(0, ...run.periods.rows.map((row) => row.rms));
   const rms = Math.sqrt(wave.tally.i2t / span);
   const drift = path.elements.map(({ dissipation }, k) => (wave.tally.body[k]! / span - circuit.bodyPower(k, run.wave.y, cycle.rms)) / dissipation);
   return {
     temperature: Math.max(...drift.map(Math.abs)),
-    rmsCurrent: Math.abs(rms - cycle.rms) / Math.max(cycle.rms, 1e-6 * path.source.amplitude),
+    rmsCurrent: Math.abs(rms - cycle.rms) / Math.max(cycle.rms, NEGLIGIBLE * highest),
   };
 };
 
@@ -51,7 +54,7 @@ export const auditOf = (run: Follow): Audit => {
   const elementEnergy = elementResiduals(run);
   const { residual, energy } = run.sourceBalance;
   const floor = 1e-9 * run.path.bulk.capacitance * run.path.source.amplitude ** 2;
-  const sourceEnergy = Math.abs(residual) / Math.max(energy, floor, 1e-12);
+  const sourceEnergy = Math.abs(residual) / Math.max(energy, run.wave.tally.dissipated, floor, 1e-12);
   const soak = run.options.traces === false ? null : soakResidual(run);
   const worstResidual = Math.max(0, sourceEnergy, soak?.rmsCurrent ?? 0, ...elementEnergy);
   const notes = [

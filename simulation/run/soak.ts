@@ -96,7 +96,7 @@ export class Soak {
       end: 'time', t: span.from, temperatures, cycle: this.cycleAt(temperatures), body: new Float64Array(count),
       given: new Float64Array(count), i2t: 0, source: 0, points: [], sides: 0,
     };
-    const before = new Float64Array(count);
+    const [before, zero] = [new Float64Array(count), new Float64Array(count)];
     let h = Math.min(span.to - span.from, 20 * span.period);
     while (result.t < span.to - 1e-9 && result.end === 'time') {
       if (!result.cycle) return { ...result, end: 'no-cycle' };
@@ -105,7 +105,7 @@ export class Soak {
       before.set(temperatures);
       stepper.take(before, result.t, h);
       result.sides += 12;
-      const error = stepper.error(floor, span.tolerance);
+      const error = stepper.error(floor, span.tolerance, zero);
       if (this.missing) return { ...result, end: 'no-cycle' };
       if (error > 1 && h > span.period) {
         h = Math.max(span.period, h * Math.max(0.2, 0.9 * error ** -0.25));

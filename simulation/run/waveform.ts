@@ -28,6 +28,8 @@ export type OnStep = (wave: Waveform, from: number, h: number) => void;
 /** s; two instants closer than this are one. */
 const INSTANT = 1e-12;
 const SIDES_PER_STEP = 12;
+/** Below these an error counts absolutely: K, share of the source amplitude, share of the largest current. */
+const FLOOR = { temperature: 1, bus: 0.2, current: 0.02 };
 
 /** Event-located integration of the circuit on the waveform scale. */
 export class Waveform {
@@ -40,8 +42,12 @@ export class Waveform {
   stoppedAs: 'step-too-small' | 'step-budget' | null = null;
   readonly tally: Tally;
   private h: number;
+  /** Begin of the conduction that goes on, and from there to the next crest or zero; s. */
+  private pulse = { since: -Infinity, toCrest: 0 };
   private readonly stepper: DoubledStep;
   private readonly floor: Float64Array;
+  /** What errors are measured against: the rise of a temperature and the swing of the bus, not their absolute values. */
+  private readonly origin: Float64Array;
   private readonly scheduled: Scheduled[] = [];
 
   constructor(
@@ -58,9 +64,11 @@ export class Waveform {
     this.before = new Float64Array(circuit.size);
     this.stepper = new DoubledStep(circuit.size, circuit.derivative);
     this.tally = new Tally(circuit);
-    this.floor = new Float64Array(circuit.size).fill(30);
-    this.floor[0] = 0.1 * amplitude;
-    this.floor[circuit.size - 1] = (0.02 * amplitude) / Math.max(resistance, circuit.seriesResistance(start.y));
+    this.floor = new Float64Array(circuit.size).fill(FLOOR.temperature);
+    this.origin = Float64Array.from(start.y);
+    this.origin[circuit.size - 1] = 0;
+    this.floor[0] = FLOOR.bus * amplitude;
+    this.floor[circuit.size - 1] = (FLOOR.current * amplitude) / Math.max(resistance, circuit.seriesResistance(start.y));
     this.h = frequency > 0 ? 1e-3 / frequency : 1e-6;
   }
 
@@ -134,6 +142,7 @@ export class Waveform {
   private conduct(s: Conduction, drive: number): void {
     const { circuit, y } = this;
     circuit.conduction = s;
+    this.pulse = { since: this.t, toCrest: this.nextQuarter() - this.t };
     y[circuit.size - 1] = 0;
     circuit.chooseReduction(y, drive > 1e-3 * circuit.path.source.amplitude);
     this.everInductive ||= circuit.inductive;
@@ -143,14 +152,15 @@ export class Waveform {
     const { y, stepper, before } = this;
     const room = limit - this.t;
     const wanted = this.h;
-    let h = Math.min(wanted, room);
+    let h = Math.min(wanted, room, this.longestStep());
     before.set(y);
+    this.origin[0] = y[0]!;
     let cut = h < wanted;
     for (;;) {
       if (this.sides > this.options.budget) return this.stop('step-budget');
       stepper.take(before, this.t, h);
       this.sides += SIDES_PER_STEP;
-      const error = stepper.error(this.floor, this.options.tolerance);
+      const error = stepper.error(this.floor, this.options.tolerance, this.origin);
       if (error <= 1) {
         // A step that only the limit cut short says nothing against a long one.
         this.h = Math.max(cut ? wanted : 0, h * Math.min(3, Math.max(1, 0.9 * error ** -0.2)));
@@ -169,6 +179,13 @@ export class Waveform {
     stepper.extrapolate();
     this.accept(h, h >= room - INSTANT ? limit : this.t + h);
     if (found) for (const apply of found.all) apply();
+  }
+
+  /** A pulse of any width is taken in six steps or more, or its heat would be summed too coarsely. */
+  private longestStep(): number {
+    const { circuit, pulse, t } = this;
+    if (circuit.conduction === 0 || circuit.path.source.kind === 'dc') return Infinity;
+    return Math.max(pulse.toCrest, t - pulse.since) / 3;
   }
 
   private stop(reason: 'step-too-small' | 'step-budget'): void {

@@ -49,12 +49,12 @@ export class DoubledStep {
     return stepper.y;
   }
 
-  /** Largest error over its allowance `tolerance·(floor + |y|)`; below 1 the step is good. NaN counts as infinite. */
-  error(floor: Float64Array, tolerance: number): number {
+  /** Largest error over its allowance `tolerance·(floor + |y − origin|)`; below 1 the step is good. NaN counts as infinite. */
+  error(floor: Float64Array, tolerance: number, origin: Float64Array): number {
     let worst = 0;
     for (let k = 0; k < this.size; k += 1) {
       const difference = Math.abs(this.end[k]! - this.whole[k]!) / 15;
-      const allowed = tolerance * (floor[k]! + Math.abs(this.end[k]!));
+      const allowed = tolerance * (floor[k]! + Math.abs(this.end[k]! - origin[k]!));
       const share = difference / allowed;
       if (!(share <= worst)) worst = share;
     }
