@@ -140,13 +140,25 @@ export class Circuit {
 
   /**
    * Whether the current needs to be a state: not where L/R is far below both RC and 1/ω. A start onto a standing
-   * voltage needs its rise; a start from zero volts does not.
+   * voltage needs its rise; a pulse that begins at zero volts does not.
    */
-  chooseReduction(y: Float64Array, hardStart: boolean): void {
+  needsInductance(y: Float64Array, hardStart: boolean): boolean {
     const { source, bulk } = this.path;
     const resistance = this.seriesResistance(y) + bulk.esr;
     const slowest = Math.min(resistance * bulk.capacitance, this.omega > 0 ? 1 / this.omega : Infinity);
-    this.inductive = source.inductance > (hardStart ? 1e-4 : 1e-3) * resistance * slowest;
+    return source.inductance > (hardStart ? 1e-4 : 5e-3) * resistance * slowest;
+  }
+
+  /** The shortest time constant of line current and bus in the present state, s. */
+  fastestTime(y: Float64Array): number {
+    const { source, bulk } = this.path;
+    const conductance = this.busConductance();
+    const drained = 1 + bulk.esr * conductance;
+    const busRate = conductance / (drained * bulk.capacitance);
+    if (this.conduction === 0) return 1 / busRate;
+    const resistance = this.seriesResistance(y) + bulk.esr / drained;
+    const lineRate = this.inductive ? resistance / source.inductance : 1 / (resistance * bulk.capacitance);
+    return 1 / Math.max(busRate, lineRate);
   }
 
   derivative = (dydt: Float64Array, y: Float64Array, t: number): void => {

@@ -36,7 +36,7 @@ const soakResidual = (run: Follow): Audit['soak'] => {
   y[circuit.size - 1] = spilling || path.source.kind === 'dc' ? cycle.lineCurrent : 0;
   if (spilling) twin.conduction = -1;
   if (path.source.kind === 'dc') twin.conduction = 1;
-  if (twin.conduction !== 0) twin.chooseReduction(y, false);
+  if (twin.conduction !== 0) twin.inductive = twin.needsInductance(y, false);
   const wave = new Waveform(twin, { t: 0, y }, { tolerance: run.options.tolerance ?? 1e-5, budget: 400_000 }, () => [], () => undefined);
   const length = new Periods(wave).length;
   for (let k = 1; k <= STRETCH; k += 1) wave.run(k * length, () => false);

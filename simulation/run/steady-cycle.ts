@@ -47,7 +47,7 @@ const halfCycle = (options: CycleOptions, resistance: number, v: number, i: numb
   const y = Float64Array.of(v, options.path.ambient, i);
   if (i > 0) {
     circuit.conduction = -1;
-    circuit.chooseReduction(y, false);
+    circuit.inductive = circuit.needsInductance(y, false);
   }
   const wave = new Waveform(circuit, { t: 0, y }, { tolerance: options.tolerance, budget: 200_000 }, () => [], () => periods.add());
   const periods = new Periods(wave);
