@@ -47,7 +47,7 @@ export class FirstPulse {
   private isOver(before: number, after: number): boolean {
     const { circuit } = this.wave;
     if (circuit.path.source.kind === 'ac') return Math.abs(after) <= 1e-9 * this.peak;
-    return before * after <= 0 || Math.abs(after) < DC_END * this.peak;
+    return before * after < 0 || (Math.abs(after) < Math.abs(before) && Math.abs(after) < DC_END * this.peak);
   }
 
   /** Time for which the current stays above a share of the peak, s. */

@@ -42,7 +42,7 @@ export class Follow {
   soakSides = 0;
   hiccups = false;
   readonly hottest: number[];
-  bypass = { closedAt: null as number | null, voltage: null as number | null, peak: null as number | null };
+  readonly bypass = { closedAt: null as number | null, voltage: null as number | null, peak: null as number | null };
   underLoad = { start: null as number | null, lowest: Infinity, ended: false };
   trip = { reference: 0, at: null as number | null, i2t: 0, energy: 0, from: 0, fromI2t: 0, fromEnergy: 0 };
   private waitUntil = 0;
@@ -131,10 +131,6 @@ export class Follow {
     for (; this.known < events.length; this.known += 1) {
       const event = events[this.known]!;
       const { wave } = this;
-      if (event.kind === 'contact-closes' && this.bypass.closedAt === null) {
-        const line = Math.abs(wave.tally.end.line);
-        this.bypass = { closedAt: event.at, voltage: line * this.path.elements[event.element!]!.law.resistance(wave.y[1 + event.element!]!), peak: 0 };
-      }
       if (event.kind === 'load-starts' && this.underLoad.start === null) this.underLoad.start = wave.tally.end.bus;
       if (event.kind === 'load-stops') {
         this.underLoad.ended = true;
@@ -153,7 +149,11 @@ export class Follow {
   }
 
   private followBypass(): void {
-    const { bypass, wave, periods } = this;
+    const { bypass, wave, periods, happenings } = this;
+    if (happenings.firstClosing && bypass.closedAt === null) {
+      const { at, voltage } = happenings.firstClosing;
+      Object.assign(bypass, { closedAt: at, voltage, peak: 0 });
+    }
     if (bypass.closedAt === null || wave.t > bypass.closedAt + Math.max(2 * periods.length, 0.05)) return;
     const { start, middle, end } = wave.tally;
     bypass.peak = Math.max(bypass.peak!, Math.abs(start.line), Math.abs(middle.line), Math.abs(end.line));

@@ -11,6 +11,8 @@ export class Happenings {
   readonly events: RunEvent[] = [];
   readonly startResistance: number[];
   readonly tripped: boolean[];
+  /** The first closing of a contact, with the voltage over it just before; s, V. */
+  firstClosing: { at: number; voltage: number } | null = null;
   private wave!: Waveform;
   private loadTimer: Scheduled | null = null;
   private supplyGoing = false;
@@ -107,9 +109,12 @@ export class Happenings {
   }
 
   private closeContact(k: number): void {
-    if (this.circuit.closed[k]) return;
-    this.circuit.closed[k] = true;
-    this.record('contact-closes', this.wave.t, k);
+    const { circuit, wave } = this;
+    if (circuit.closed[k]) return;
+    const voltage = Math.abs(circuit.lineCurrent(wave.y, wave.t)) * circuit.path.elements[k]!.law.resistance(wave.y[1 + k]!);
+    this.firstClosing ??= { at: wave.t, voltage };
+    circuit.closed[k] = true;
+    this.record('contact-closes', wave.t, k);
   }
 
   private openContact(k: number, at: number): void {
