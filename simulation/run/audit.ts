@@ -6,8 +6,8 @@ import { Waveform } from './waveform';
 
 /** Relative residual up to which a run counts as clean. */
 const CLEAN = 5e-3;
-/** K; a soak further than this from the waveform at its end is not clean. */
-const CLEAN_TEMPERATURE = 0.3;
+/** K, and share of the rise over ambient; a soak further than both from the waveform at its end is not clean. */
+const CLEAN_TEMPERATURE = { absolute: 0.3, relative: 3e-3 };
 /** Share of the highest half-period current below which a disagreement on the steady one moves nothing. */
 const NEGLIGIBLE = 0.01;
 /** Half periods of full waveform that the end of a soak is held against. */
@@ -22,7 +22,10 @@ const elementResiduals = ({ path, wave, startTemperatures }: Follow): number[] =
     return Math.abs(absorbed - given - stored) / own;
   });
 
-/** A stretch of full waveform from the state at the end of the last soak, beside what the soak took it for. */
+/**
+ * A stretch of full waveform from the state at the end of the last soak, beside what the soak took it for; the
+ * temperature is what the difference in heating made of all the time that was soaked.
+ */
 const soakResidual = (run: Follow): Audit['soak'] => {
   const { endCycle: cycle, path, circuit } = run;
   if (!cycle || path.elements.length === 0) return null;
@@ -43,7 +46,11 @@ const soakResidual = (run: Follow): Audit['soak'] => {
   const span = STRETCH * length;
   const highest = Math.max(0, ...run.periods.rows.map((row) => row.rms));
   const rms = Math.sqrt(wave.tally.i2t / span);
-  const drift = path.elements.map(({ dissipation }, k) => (wave.tally.body[k]! / span - circuit.bodyPower(k, run.wave.y, cycle.rms)) / dissipation);
+  const soaked = run.soaked.reduce((sum, { from, points }) => sum + points[points.length - 1]!.time - from, 0);
+  const drift = path.elements.map(({ dissipation, heatCapacity }, k) => {
+    const power = wave.tally.body[k]! / span - circuit.bodyPower(k, run.wave.y, cycle.rms);
+    return (power / dissipation) * -Math.expm1((-soaked * dissipation) / heatCapacity);
+  });
   return {
     temperature: Math.max(...drift.map(Math.abs)),
     rmsCurrent: Math.abs(rms - cycle.rms) / Math.max(cycle.rms, NEGLIGIBLE * highest),
@@ -57,10 +64,12 @@ export const auditOf = (run: Follow): Audit => {
   const sourceEnergy = Math.abs(residual) / Math.max(energy, run.wave.tally.dissipated, floor, 1e-12);
   const soak = run.options.traces === false ? null : soakResidual(run);
   const worstResidual = Math.max(0, sourceEnergy, soak?.rmsCurrent ?? 0, ...elementEnergy);
+  const rise = Math.max(0, ...run.hottest.map((hottest) => hottest - run.path.ambient));
+  const allowed = Math.max(CLEAN_TEMPERATURE.absolute, CLEAN_TEMPERATURE.relative * rise);
   const notes = [
     ...(run.pulses.expected === run.pulses.found ? [] : [`${run.pulses.expected - run.pulses.found} pulses were passed over`]),
     ...(worstResidual < CLEAN ? [] : [`the largest residual is ${(100 * worstResidual).toPrecision(2)} %`]),
-    ...((soak?.temperature ?? 0) < CLEAN_TEMPERATURE ? [] : ['the soak and the waveform disagree on the final temperature']),
+    ...((soak?.temperature ?? 0) < allowed ? [] : ['the soak and the waveform disagree on the final temperature']),
   ];
   return { clean: notes.length === 0, worstResidual, elementEnergy, sourceEnergy, pulses: { ...run.pulses }, soak, notes };
 };

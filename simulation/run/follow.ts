@@ -32,7 +32,7 @@ export class Follow {
   readonly periods: Periods;
   readonly history: History;
   readonly pulse: FirstPulse;
-  readonly soaked: { points: SoakPoint[]; offset: { i2t: number; source: number; energy: number[] } }[] = [];
+  readonly soaked: { from: number; points: SoakPoint[]; offset: { i2t: number; source: number; energy: number[] } }[] = [];
   readonly startTemperatures: number[];
   readonly pulses = { expected: 0, found: 0 };
   readonly sourceBalance = { residual: 0, energy: 0 };
@@ -215,7 +215,7 @@ export class Follow {
   private resume(cycle: SteadyCycle, result: ReturnType<Soak['run']>, map: CycleMap): void {
     const { wave, circuit, periods, options } = this;
     const { tally, y } = wave;
-    this.soaked.push({ points: result.points, offset: { i2t: tally.i2t, source: tally.source, energy: Array.from(tally.body) } });
+    this.soaked.push({ from: wave.t, points: result.points, offset: { i2t: tally.i2t, source: tally.source, energy: Array.from(tally.body) } });
     wave.jump(result.t);
     y[0] = cycle.capacitorVoltage;
     y.set(result.temperatures, 1);

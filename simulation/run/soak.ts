@@ -42,6 +42,8 @@ export interface SoakSpan {
 /** Share by which a resistance may move within one period before the averaging no longer describes it. */
 const FAST = 0.02;
 const MOST_STEPS = 4000;
+/** Thermal time constants in one step; further on step doubling would no longer see its own error. */
+const LONGEST = 2;
 
 /** Temperatures moved on by the heating averaged over the repeating cycle. */
 export class Soak {
@@ -97,11 +99,12 @@ export class Soak {
       given: new Float64Array(count), i2t: 0, source: 0, points: [], sides: 0,
     };
     const [before, zero] = [new Float64Array(count), new Float64Array(count)];
+    const longest = LONGEST * Math.min(...this.circuit.path.elements.map(({ heatCapacity, dissipation }) => heatCapacity / dissipation));
     let h = Math.min(span.to - span.from, 20 * span.period);
     while (result.t < span.to - 1e-9 && result.end === 'time') {
       if (!result.cycle) return { ...result, end: 'no-cycle' };
       if (result.sides > 12 * MOST_STEPS) return { ...result, end: 'budget' };
-      h = Math.min(h, span.to - result.t);
+      h = Math.min(h, longest, span.to - result.t);
       before.set(temperatures);
       stepper.take(before, result.t, h);
       result.sides += 12;
