@@ -155,7 +155,7 @@ export class Circuit {
     const conductance = this.busConductance();
     const drained = 1 + bulk.esr * conductance;
     const busRate = conductance / (drained * bulk.capacitance);
-    if (this.conduction === 0) return 1 / busRate;
+    if (this.conduction === 0) return y[0] === 0 ? Infinity : 1 / busRate;
     const resistance = this.seriesResistance(y) + bulk.esr / drained;
     const lineRate = this.inductive ? resistance / source.inductance : 1 / (resistance * bulk.capacitance);
     return 1 / Math.max(busRate, lineRate);

@@ -44,7 +44,7 @@ const soakResidual = (run: Follow): Audit['soak'] => {
   const length = new Periods(wave).length;
   for (let k = 1; k <= STRETCH; k += 1) wave.run(k * length, () => false);
   const span = STRETCH * length;
-  const highest = Math.max(0, ...run.periods.rows.map((row) => row.rms));
+  const highest = run.periods.rows.reduce((most, row) => Math.max(most, row.rms), 0);
   const rms = Math.sqrt(wave.tally.i2t / span);
   const soaked = run.soaked.reduce((sum, { from, points }) => sum + points[points.length - 1]!.time - from, 0);
   const drift = path.elements.map(({ dissipation, heatCapacity }, k) => {

@@ -42,6 +42,9 @@ const interpolate = (time: readonly number[], column: readonly number[], k: numb
   return t1 > t0 ? column[k - 1]! + ((at - t0) / (t1 - t0)) * (column[k]! - column[k - 1]!) : column[k]!;
 };
 
+/** Not by Math.max(...): a long run has more values than a call may have arguments. */
+const largest = (values: readonly number[]): number => values.reduce((most, one) => Math.max(most, one), -Infinity);
+
 const chargedInHistory = ({ history }: Follow, level: number): Charged | null => {
   const { time, bus, i2t, energy, temperature } = history;
   const k = bus.findIndex((one) => one >= level);
@@ -52,7 +55,7 @@ const chargedInHistory = ({ history }: Follow, level: number): Charged | null =>
     at,
     i2t: interpolate(time, i2t, k, at),
     energy: energy.map((column) => interpolate(time, column, k, at)),
-    hottest: temperature.map((column) => Math.max(...column.slice(0, k + 1))),
+    hottest: temperature.map((column) => largest(column.slice(0, k + 1))),
   };
 };
 
@@ -61,7 +64,7 @@ const chargedInRows = ({ periods }: Follow, level: number): Charged | null => {
   const k = rows.findIndex((row) => row.highestBus >= level);
   if (k < 0) return null;
   const row = rows[k]!;
-  const hottest = row.temperature.map((_, n) => Math.max(...rows.slice(0, k + 1).map(({ temperature }) => temperature[n]!)));
+  const hottest = row.temperature.map((_, n) => largest(rows.slice(0, k + 1).map(({ temperature }) => temperature[n]!)));
   return { at: row.end, i2t: row.i2t, energy: row.energy, hottest };
 };
 
@@ -84,7 +87,7 @@ const dischargeTime = (voltage: number, { bulk }: Follow['path']): number | null
 
 const sum = (values: readonly number[]) => values.reduce((total, one) => total + one, 0);
 
-const highest = (run: Follow, pick: (row: Period) => number): number => Math.max(0, ...run.periods.rows.map(pick));
+const highest = (run: Follow, pick: (row: Period) => number): number => Math.max(0, largest(run.periods.rows.map(pick)));
 
 const peakOf = (run: Follow): { value: number; at: number } => {
   const { pulse, periods } = run;

@@ -47,9 +47,10 @@ export class Happenings {
     return this.current;
   };
 
-  /** To be asked after every step: a supply that is to go off opens at the first instant without current. */
+  /** To be asked after every step: an AC supply that is to go off opens at the first instant without current. */
   openIfBlocked(): void {
-    if (!this.supplyGoing || (this.circuit.bridge && this.circuit.conduction !== 0)) return;
+    const { circuit } = this;
+    if (!this.supplyGoing || (circuit.path.source.kind === 'ac' && circuit.conduction !== 0)) return;
     this.supplyGoing = false;
     this.circuit.supplied = false;
     this.loseInductiveEnergy();

@@ -136,10 +136,11 @@ export class Waveform {
     return (Math.floor(quarters + 1e-7) + 1 - (2 * phase) / Math.PI) / (4 * frequency);
   }
 
-  /** Starts conduction that the voltages ask for at this very instant. */
+  /** Starts or ends the conduction that the voltages ask for at this very instant; a bus that has run empty stays so. */
   private settleConduction(): void {
     const { circuit, y, t } = this;
     if (circuit.conduction !== 0) this.settleEnd();
+    else if (Math.abs(y[0]!) < NEARLY * circuit.path.source.amplitude) y[0] = 0;
     if (circuit.conduction !== 0 || !circuit.supplied) return;
     const s: Conduction = circuit.sourceVoltage(t) < 0 ? -1 : 1;
     const slope = s * circuit.sourceSlope(t);
