@@ -5,6 +5,10 @@ export type Conduction = -1 | 0 | 1;
 
 /** V; below it a constant-power load would ask for a current without bound. */
 const TINY = 1e-9;
+/** Time in which a following bus settles, as a share of 1/ω. */
+const FOLLOWING = 2e-3;
+/** s; what takes the place of 1/ω on DC. */
+const DIRECT_SCALE = 0.01;
 
 /**
  * The power-up path as a set of differential equations with a discrete state.
@@ -18,6 +22,8 @@ export class Circuit {
   conduction: Conduction = 0;
   /** False where the current is given by the voltages: L/R far below the accuracy asked for. */
   inductive: boolean;
+  /** True while the bus follows the line: R·C far below the accuracy asked for. */
+  follows = false;
   supplied = true;
   loadSince: number | null = null;
   faulted = false;
@@ -127,10 +133,39 @@ export class Circuit {
     const s = this.conduction;
     if (s === 0) return 0;
     if (this.inductive) return y[this.count + 1]!;
-    const { esr } = this.path.bulk;
-    const bus = esr / (1 + esr * this.busConductance());
-    const current = this.drive(y, t, s) / (this.seriesResistance(y) + bus);
+    const current = this.follows ? this.followingCurrent(y, t) : this.drivenCurrent(y, t);
     return this.bridge ? Math.max(0, current) : current;
+  }
+
+  /** Line current that the voltages drive at once, without inductance, A. */
+  drivenCurrent(y: Float64Array, t: number): number {
+    const { esr } = this.path.bulk;
+    return this.drive(y, t, this.conduction) / (this.seriesResistance(y) + esr / (1 + esr * this.busConductance()));
+  }
+
+  /**
+   * Line current where the bus follows the line, A: C·d|v|/dt and the loads, and what brings the bus to where it
+   * belongs within `settling()`, far longer than R·C and far shorter than anything else.
+   */
+  followingCurrent(y: Float64Array, t: number): number {
+    const { capacitance, esr } = this.path.bulk;
+    const charging = capacitance * this.conduction * this.sourceSlope(t);
+    const bus = y[0]! + esr * charging;
+    const line = charging + this.loadCurrent(y[0]!, t) + this.busConductance() * bus;
+    const belongs = this.conduction * this.sourceVoltage(t) - this.drop - this.seriesResistance(y) * line - esr * charging;
+    return line + (capacitance * (belongs - y[0]!)) / this.settling();
+  }
+
+  private settling(): number {
+    return FOLLOWING * (this.omega > 0 ? 1 / this.omega : DIRECT_SCALE);
+  }
+
+  /** Whether R·C is far below what else happens, and the bus is where the following current would have it. */
+  mayFollow(y: Float64Array, t: number): boolean {
+    const resistance = this.seriesResistance(y) + this.path.bulk.esr;
+    if (this.inductive || resistance * this.path.bulk.capacitance > 0.1 * this.settling()) return false;
+    const driven = this.drivenCurrent(y, t);
+    return Math.abs(driven - this.followingCurrent(y, t)) <= 0.01 * Math.abs(driven);
   }
 
   /** Power from the source, W. */
@@ -145,7 +180,10 @@ export class Circuit {
   needsInductance(y: Float64Array, hardStart: boolean): boolean {
     const { source, bulk } = this.path;
     const resistance = this.seriesResistance(y) + bulk.esr;
-    const slowest = Math.min(resistance * bulk.capacitance, this.omega > 0 ? 1 / this.omega : Infinity);
+    const scale = this.omega > 0 ? 1 / this.omega : DIRECT_SCALE;
+    const charging = resistance * bulk.capacitance;
+    // Once a start is over, a ringing far faster than the line tells nothing more than the line itself.
+    const slowest = !hardStart && charging < FOLLOWING * scale ? scale : Math.min(charging, this.omega > 0 ? scale : Infinity);
     return source.inductance > (hardStart ? 1e-4 : 5e-3) * resistance * slowest;
   }
 
@@ -157,6 +195,7 @@ export class Circuit {
     const busRate = conductance / (drained * bulk.capacitance);
     if (this.conduction === 0) return y[0] === 0 ? Infinity : 1 / busRate;
     const resistance = this.seriesResistance(y) + bulk.esr / drained;
+    if (this.follows) return this.settling();
     const lineRate = this.inductive ? resistance / source.inductance : 1 / (resistance * bulk.capacitance);
     return 1 / Math.max(busRate, lineRate);
   }

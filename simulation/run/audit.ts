@@ -7,7 +7,7 @@ import { Waveform } from './waveform';
 /** Relative residual up to which a run counts as clean. */
 const CLEAN = 5e-3;
 /** K, and share of the rise over ambient; a soak further than both from the waveform at its end is not clean. */
-const CLEAN_TEMPERATURE = { absolute: 0.3, relative: 3e-3 };
+const CLEAN_TEMPERATURE = { absolute: 0.3, relative: 5e-3 };
 /** Share of the highest half-period current below which a disagreement on the steady one moves nothing. */
 const NEGLIGIBLE = 0.01;
 /** Half periods of full waveform that the end of a soak is held against. */

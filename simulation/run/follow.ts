@@ -15,7 +15,8 @@ import { Waveform } from './waveform';
 export const FOLD = 0.1;
 const TOLERANCE = 1e-5;
 const SOAK_TOLERANCE = 1e-6;
-const BUDGET = 4_000_000;
+/** Right-hand sides; some two seconds. */
+const BUDGET = 1_500_000;
 /** Load stops after which a hiccup counts as endless. */
 const HICCUPS = 8;
 /** Periods that must be free of known events for a soak to be worth its start, and that are waited after one failed. */
@@ -131,6 +132,8 @@ export class Follow {
     for (; this.known < events.length; this.known += 1) {
       const event = events[this.known]!;
       const { wave } = this;
+      // What happens after the last soak makes another cycle.
+      this.endCycle = null;
       if (event.kind === 'load-starts' && this.underLoad.start === null) this.underLoad.start = wave.tally.end.bus;
       if (event.kind === 'load-stops') {
         this.underLoad.ended = true;
@@ -204,7 +207,8 @@ export class Follow {
     const { load } = path;
     const result = new Soak(circuit, map, temperatures).run({
       from: wave.t, to: whole, period: periods.length, tolerance: SOAK_TOLERANCE,
-      startsAt: load.kind === 'constant-power' && !loadRuns && !happenings.loadPending ? load.startVoltage : null,
+      // A bus that swings past the start voltage in every cycle without a start will go on so.
+      startsAt: load.kind === 'constant-power' && !loadRuns && !happenings.loadPending && cycle.highestBus < load.startVoltage ? load.startVoltage : null,
       stopsAt: load.kind === 'constant-power' && loadRuns ? load.stopVoltage : null,
     });
     this.soakSides += result.sides;

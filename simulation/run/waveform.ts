@@ -28,6 +28,8 @@ export type OnStep = (wave: Waveform, from: number, h: number) => void;
 /** s; two instants closer than this are one. */
 const INSTANT = 1e-12;
 const SIDES_PER_STEP = 12;
+/** Steps after which a hard start is over. */
+const SEVERAL = 100;
 /** Share of the source amplitude within which a driving voltage counts as zero. */
 const NEARLY = 1e-9;
 /** Time constants in one step of two halves; each half is stable up to 2.78. */
@@ -47,6 +49,7 @@ export class Waveform {
   stoppedAs: 'step-too-small' | 'step-budget' | null = null;
   readonly tally: Tally;
   private h: number;
+  private steps = 0;
   /** Begin of the conduction that goes on, and from there to the next crest or zero; s. */
   private pulse = { since: -Infinity, toCrest: 0 };
   private readonly stepper: DoubledStep;
@@ -105,14 +108,26 @@ export class Waveform {
     this.applyDue();
     while (this.t < end - INSTANT && !this.stoppedAs && !shouldStop()) {
       this.settleConduction();
-      if (this.circuit.inductive) this.reconsiderInductance(true);
+      this.reduce();
       this.advance(Math.min(end, this.nextScheduled(), this.nextQuarter()));
       this.applyDue();
     }
   }
 
+  /** Leaves behind what has become too fast to matter: the rise of the current, or the charging of a small capacitor. */
+  private reduce(): void {
+    const { circuit, y, t } = this;
+    if (circuit.conduction === 0) return;
+    this.steps += 1;
+    if (circuit.inductive) this.reconsiderInductance(this.steps % SEVERAL !== 0);
+    else circuit.follows ||= circuit.mayFollow(y, t);
+  }
+
   private applyDue(): void {
-    while (this.nextScheduled() <= this.t + INSTANT) this.scheduled.shift()!.apply();
+    while (this.nextScheduled() <= this.t + INSTANT) {
+      this.circuit.follows = false;
+      this.scheduled.shift()!.apply();
+    }
   }
 
   /** R(T) and contacts move under a standing current: whether that current must be a state is asked anew. */
@@ -163,6 +178,8 @@ export class Waveform {
   private conduct(s: Conduction, drive: number): void {
     const { circuit, y } = this;
     circuit.conduction = s;
+    circuit.follows = false;
+    this.steps = 0;
     this.pulse = { since: this.t, toCrest: this.nextQuarter() - this.t };
     y[circuit.size - 1] = 0;
     circuit.inductive = circuit.needsInductance(y, drive > 1e-3 * circuit.path.source.amplitude);
@@ -170,7 +187,7 @@ export class Waveform {
   }
 
   private advance(limit: number): void {
-    const { y, stepper, before } = this;
+    const { y, stepper, before, circuit } = this;
     const room = limit - this.t;
     const wanted = this.h;
     let h = Math.min(wanted, room, this.longestStep());
@@ -199,7 +216,9 @@ export class Waveform {
     }
     stepper.extrapolate();
     this.accept(h, h >= room - INSTANT ? limit : this.t + h);
-    if (found) for (const apply of found.all) apply();
+    if (!found) return;
+    circuit.follows = false;
+    for (const apply of found.all) apply();
   }
 
   /**
@@ -265,7 +284,7 @@ export class Waveform {
     const last = circuit.size - 1;
     return [
       {
-        value: circuit.inductive ? (y) => y[last]! : (y, t) => circuit.drive(y, t, s),
+        value: circuit.inductive ? (y) => y[last]! : (y, t) => (circuit.follows ? circuit.followingCurrent(y, t) : circuit.drive(y, t, s)),
         rising: false,
         apply: () => {
           circuit.conduction = 0;
