@@ -1,5 +1,5 @@
 import type { Audit } from '../../shared/model/result';
-import { Circuit } from '../circuit/circuit';
+import { twinOf } from '../circuit/twin';
 import type { Follow } from './follow';
 import { Periods } from './periods';
 import { Waveform } from './waveform';
@@ -29,10 +29,7 @@ const elementResiduals = ({ path, wave, startTemperatures }: Follow): number[] =
 const soakResidual = (run: Follow): Audit['soak'] => {
   const { endCycle: cycle, path, circuit } = run;
   if (!cycle || path.elements.length === 0) return null;
-  const twin = new Circuit({ ...path, source: { ...path.source, phase: 0, programme: [] } });
-  twin.loadSince = circuit.loadSince === null ? null : -Infinity;
-  twin.faulted = circuit.faulted;
-  circuit.closed.forEach((closed, k) => (twin.closed[k] = closed));
+  const twin = twinOf(circuit);
   const y = Float64Array.from(run.wave.y);
   y[0] = cycle.capacitorVoltage;
   const spilling = path.source.kind === 'ac' && cycle.lineCurrent > 0;

@@ -2,6 +2,7 @@ import type { RunEvent } from '../../shared/model/result';
 import { Circuit } from '../circuit/circuit';
 import type { PowerPath } from '../circuit/path';
 import { CycleMap } from './cycle-map';
+import { Drift, type DriftResult } from './drift';
 import { FirstPulse } from './first-pulse';
 import { Happenings } from './happenings';
 import { History } from './history';
@@ -22,6 +23,8 @@ const HICCUPS = 8;
 /** Periods that must be free of known events for a soak to be worth its start, and that are waited after one failed. */
 const WORTHWHILE = 6;
 const PATIENCE = 10;
+/** Periods that are left to the waveform at the end of a drift. */
+const LAST = 8;
 /** Share of the amplitude by which the bus may miss the repeating cycle. */
 const SETTLED = 2e-3;
 
@@ -73,7 +76,7 @@ export class Follow {
       const boundary = this.circuit.supplied ? periods.next(wave.t) : Math.max(periods.next(wave.t), wave.nextScheduled());
       this.balanced(() => wave.run(Math.min(boundary, options.duration), () => this.finished()));
       if (wave.t >= boundary - 1e-12 || wave.t >= options.duration - 1e-9) periods.cut();
-      if (!options.waveformOnly && this.readyToSoak()) this.soak();
+      if (!options.waveformOnly && this.readyToSoak() && !this.soak()) this.drift();
     }
   }
 
@@ -193,7 +196,8 @@ export class Follow {
     });
   }
 
-  private soak(): void {
+  /** False where the cycle that would repeat for good has not been reached yet. */
+  private soak(): boolean {
     const { wave, circuit, periods, happenings, options, path } = this;
     const temperatures = Float64Array.from(wave.y.subarray(1, 1 + circuit.count));
     const loadRuns = circuit.loadSince !== null;
@@ -201,7 +205,7 @@ export class Follow {
     const cycle = map.at(circuit.elementsResistance(wave.y));
     const amplitude = path.source.amplitude;
     this.waitUntil = wave.t + PATIENCE * periods.length;
-    if (!cycle || Math.abs(cycle.capacitorVoltage - wave.y[0]!) > SETTLED * amplitude) return;
+    if (!cycle || Math.abs(cycle.capacitorVoltage - wave.y[0]!) > SETTLED * amplitude) return false;
     const to = Math.min(wave.nextScheduled(), options.duration);
     const whole = path.source.kind === 'dc' ? to : periods.next(to) - periods.length;
     const { load } = path;
@@ -212,31 +216,58 @@ export class Follow {
       stopsAt: load.kind === 'constant-power' && loadRuns ? load.stopVoltage : null,
     });
     this.soakSides += result.sides;
-    if (!result.cycle || result.points.length === 0) return;
-    this.resume(result.cycle, result, map);
+    if (result.cycle && result.points.length > 0) this.resume(result.cycle, result, map);
+    return true;
+  }
+
+  /** Many half periods at once while bus and bodies move slowly towards a cycle that repeats. */
+  private drift(): void {
+    const { wave, circuit, periods, happenings, options, path } = this;
+    if (path.source.kind === 'dc' || circuit.conduction !== 0) return;
+    const { load, elements } = path;
+    const contacts = elements.flatMap(({ bypass }, k) => (bypass?.closes.when === 'bus-voltage' && bypass.behaviour === 'works' && !circuit.closed[k] ? [bypass.closes.above] : []));
+    const loadRuns = circuit.loadSince !== null;
+    const starts = load.kind === 'constant-power' && !loadRuns && !happenings.loadPending ? [load.startVoltage] : [];
+    const stops = load.kind === 'constant-power' && (loadRuns || happenings.loadPending) ? [load.stopVoltage] : [];
+    const to = Math.min(wave.nextScheduled(), options.duration) - LAST * periods.length;
+    const span = { from: wave.t, to, rising: [...contacts, ...starts], falling: stops, tolerance: SOAK_TOLERANCE };
+    const result = new Drift(circuit).run(wave.y[0]!, Float64Array.from(wave.y.subarray(1, 1 + circuit.count)), span);
+    if (!result) return;
+    this.soakSides += result.sides;
+    this.moveOn(result, result.points);
+    wave.y[0] = result.bus;
+    wave.y.set(result.temperatures, 1);
+    this.waitUntil = wave.t + 4 * periods.length;
   }
 
   private resume(cycle: SteadyCycle, result: ReturnType<Soak['run']>, map: CycleMap): void {
     const { wave, circuit, periods, options } = this;
-    const { tally, y } = wave;
-    this.soaked.push({ from: wave.t, points: result.points, offset: { i2t: tally.i2t, source: tally.source, energy: Array.from(tally.body) } });
-    wave.jump(result.t);
+    const { y } = wave;
+    this.moveOn(result, result.points);
     y[0] = cycle.capacitorVoltage;
     y.set(result.temperatures, 1);
     const flowing = cycle.lineCurrent > 0 && this.path.source.kind === 'ac';
     if (this.path.source.kind === 'ac' && !flowing) circuit.conduction = 0;
     y[circuit.size - 1] = circuit.conduction === 0 ? 0 : cycle.lineCurrent;
-    tally.i2t += result.i2t;
-    tally.source += result.source;
-    for (let k = 0; k < circuit.count; k += 1) {
-      tally.body[k]! += result.body[k]!;
-      tally.given[k]! += result.given[k]!;
-      for (const { temperature } of result.points) this.hottest[k] = Math.max(this.hottest[k]!, temperature[k]!);
-    }
-    periods.restart();
     this.lastMap = map;
     this.endCycle = result.t >= options.duration - 2 * periods.length ? cycle : null;
     this.waitUntil = wave.t + 4 * periods.length;
+  }
+
+  /** Takes over the time and the integrals of a stretch that was not followed as a waveform. */
+  private moveOn({ t, i2t, source, body, given }: Pick<DriftResult, 't' | 'i2t' | 'source'> & { body: ArrayLike<number>; given: ArrayLike<number> }, points: SoakPoint[]): void {
+    const { wave, circuit, periods } = this;
+    const { tally } = wave;
+    this.soaked.push({ from: wave.t, points, offset: { i2t: tally.i2t, source: tally.source, energy: Array.from(tally.body) } });
+    wave.jump(t);
+    tally.i2t += i2t;
+    tally.source += source;
+    for (let k = 0; k < circuit.count; k += 1) {
+      tally.body[k]! += body[k]!;
+      tally.given[k]! += given[k]!;
+      for (const { temperature } of points) this.hottest[k] = Math.max(this.hottest[k]!, temperature[k]!);
+    }
+    periods.restart();
   }
 
   /** All events in order of time; the end of charging among them. */
