@@ -77,6 +77,7 @@ export class Follow {
       this.balanced(() => wave.run(Math.min(boundary, options.duration), () => this.finished()));
       if (wave.t >= boundary - 1e-12 || wave.t >= options.duration - 1e-9) periods.cut();
       if (!options.waveformOnly && this.readyToSoak() && !this.soak()) this.drift();
+      if (wave.sides + this.soakSides > BUDGET) wave.stoppedAs = 'step-budget';
     }
   }
 

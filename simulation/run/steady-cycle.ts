@@ -82,7 +82,7 @@ export const steadyCycle = (options: CycleOptions, resistance: number, guess: nu
     if (Math.abs(gap) < near && Math.abs(section.i - i) <= 1e-4 * section.row.peak) return cycleOf(section);
     const slope: number = previous && i === 0 && section.i === 0 && v !== previous.v ? (gap - previous.gap) / (v - previous.v) : 0;
     previous = { v, gap };
-    v = slope < -1e-3 ? v - gap / slope : section.v;
+    v = slope < -1e-6 ? v - gap / slope : section.v;
     v = Math.min(Math.max(v, 0), options.path.source.amplitude);
     i = section.i;
   }
