@@ -42,15 +42,19 @@ const soakResidual = (run: Follow): Audit['soak'] => {
   for (let k = 1; k <= STRETCH; k += 1) wave.run(k * length, () => false);
   const span = STRETCH * length;
   const highest = run.periods.rows.reduce((most, row) => Math.max(most, row.rms), 0);
+  // The bodies go on warming in the stretch itself: what the soak says of its begin and of its end is compared.
+  const after = run.lastMap?.at(twin.elementsResistance(wave.y)) ?? cycle;
+  const modelledRms = Math.sqrt((cycle.rms ** 2 + after.rms ** 2) / 2);
   const rms = Math.sqrt(wave.tally.i2t / span);
   const soaked = run.soaked.reduce((sum, { from, points }) => sum + points[points.length - 1]!.time - from, 0);
   const drift = path.elements.map(({ dissipation, heatCapacity }, k) => {
-    const power = wave.tally.body[k]! / span - circuit.bodyPower(k, run.wave.y, cycle.rms);
+    const modelled = (circuit.bodyPower(k, run.wave.y, cycle.rms) + circuit.bodyPower(k, wave.y, after.rms)) / 2;
+    const power = wave.tally.body[k]! / span - modelled;
     return (power / dissipation) * -Math.expm1((-soaked * dissipation) / heatCapacity);
   });
   return {
     temperature: Math.max(...drift.map(Math.abs)),
-    rmsCurrent: Math.abs(rms - cycle.rms) / Math.max(cycle.rms, NEGLIGIBLE * highest),
+    rmsCurrent: Math.abs(rms - modelledRms) / Math.max(modelledRms, NEGLIGIBLE * highest),
   };
 };
 
