@@ -11,7 +11,7 @@ const CLEAN_TEMPERATURE = { absolute: 0.3, relative: 5e-3 };
 /** Share of the highest half-period current below which a disagreement on the steady one moves nothing. */
 const NEGLIGIBLE = 0.01;
 /** Half periods of full waveform that the end of a soak is held against. */
-const STRETCH = 4;
+const STRETCH = 2;
 
 /** Heat taken up and given off against heat absorbed, each element by itself, relative to what it absorbed. */
 const elementResiduals = ({ path, wave, startTemperatures }: Follow): number[] =>

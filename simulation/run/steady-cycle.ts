@@ -27,6 +27,10 @@ export interface CycleOptions {
 /** V over amplitude; a cycle that returns this closely repeats. */
 const RETURNS = 2e-6;
 const MOST_CYCLES = 60;
+/** Share of the amplitude within which the fixed point lies. */
+const DISTANCE = 2e-4;
+/** Gaps that a second guess is away where the first gap is small, so that the slope between them means something. */
+const FAR = 50;
 
 const frozen = ({ path, loadRuns, faulted }: CycleOptions, resistance: number): Circuit => {
   const element = { name: '', kind: 'resistor' as const, law: fixedLaw(resistance), dissipation: 1, heatCapacity: Infinity, bypass: null };
@@ -79,10 +83,15 @@ export const steadyCycle = (options: CycleOptions, resistance: number, guess: nu
     const section = halfCycle(options, resistance, v, i);
     if (!section) return null;
     const gap = section.v - v;
-    if (Math.abs(gap) < near && Math.abs(section.i - i) <= 1e-4 * section.row.peak) return cycleOf(section);
     const slope: number = previous && i === 0 && section.i === 0 && v !== previous.v ? (gap - previous.gap) / (v - previous.v) : 0;
+    const steep = slope < -1e-6;
+    // A bus of a long time constant moves little in one cycle while it is still far away: the distance counts as well.
+    const arrived = !steep || Math.abs(gap / slope) < DISTANCE * options.path.source.amplitude;
+    if (Math.abs(gap) < near && arrived && (previous || gap === 0) && Math.abs(section.i - i) <= 1e-4 * section.row.peak) return cycleOf(section);
+    const first = previous === null;
     previous = { v, gap };
-    v = slope < -1e-6 ? v - gap / slope : section.v;
+    if (steep) v -= gap / slope;
+    else v = first && Math.abs(gap) < near ? v + FAR * gap : section.v;
     v = Math.min(Math.max(v, 0), options.path.source.amplitude);
     i = section.i;
   }
