@@ -156,6 +156,11 @@ export class Circuit {
     return line + (capacitance * (belongs - y[0]!)) / this.settling();
   }
 
+  /** Time constant of the bus behind a resistance, with what lies across it, s. */
+  private chargingTime(resistance: number): number {
+    return (resistance * this.path.bulk.capacitance) / (1 + resistance * this.busConductance());
+  }
+
   private settling(): number {
     return FOLLOWING * (this.omega > 0 ? 1 / this.omega : DIRECT_SCALE);
   }
@@ -163,7 +168,7 @@ export class Circuit {
   /** Whether R·C is far below what else happens, and the bus is where the following current would have it. */
   mayFollow(y: Float64Array, t: number): boolean {
     const resistance = this.seriesResistance(y) + this.path.bulk.esr;
-    if (this.inductive || resistance * this.path.bulk.capacitance > 0.1 * this.settling()) return false;
+    if (this.inductive || this.chargingTime(resistance) > 0.1 * this.settling()) return false;
     const driven = this.drivenCurrent(y, t);
     return Math.abs(driven - this.followingCurrent(y, t)) <= 0.01 * Math.abs(driven);
   }
@@ -181,7 +186,7 @@ export class Circuit {
     const { source, bulk } = this.path;
     const resistance = this.seriesResistance(y) + bulk.esr;
     const scale = this.omega > 0 ? 1 / this.omega : DIRECT_SCALE;
-    const charging = resistance * bulk.capacitance;
+    const charging = this.chargingTime(resistance);
     // Once a start is over, a ringing far faster than the line tells nothing more than the line itself.
     const slowest = !hardStart && charging < FOLLOWING * scale ? scale : Math.min(charging, this.omega > 0 ? scale : Infinity);
     return source.inductance > (hardStart ? 1e-4 : 5e-3) * resistance * slowest;

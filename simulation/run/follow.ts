@@ -185,7 +185,7 @@ export class Follow {
     const { wave, periods, circuit, happenings, options } = this;
     const soon = wave.t + WORTHWHILE * periods.length;
     if (!circuit.supplied || happenings.supplyGoesOff || wave.t < this.waitUntil || !periods.repeats) return false;
-    return soon < Math.min(wave.nextScheduled(), options.duration) && this.isCalm();
+    return soon < Math.min(happenings.nextHappening(), options.duration) && this.isCalm();
   }
 
   private isCalm(): boolean {
@@ -207,7 +207,7 @@ export class Follow {
     const amplitude = path.source.amplitude;
     this.waitUntil = wave.t + PATIENCE * periods.length;
     if (!cycle || Math.abs(cycle.capacitorVoltage - wave.y[0]!) > SETTLED * amplitude) return false;
-    const to = Math.min(wave.nextScheduled(), options.duration);
+    const to = Math.min(happenings.nextHappening(), options.duration);
     const whole = path.source.kind === 'dc' ? to : periods.next(to) - periods.length;
     const { load } = path;
     const result = new Soak(circuit, map, temperatures).run({
@@ -230,7 +230,7 @@ export class Follow {
     const loadRuns = circuit.loadSince !== null;
     const starts = load.kind === 'constant-power' && !loadRuns && !happenings.loadPending ? [load.startVoltage] : [];
     const stops = load.kind === 'constant-power' && (loadRuns || happenings.loadPending) ? [load.stopVoltage] : [];
-    const to = Math.min(wave.nextScheduled(), options.duration) - LAST * periods.length;
+    const to = Math.min(happenings.nextHappening(), options.duration) - LAST * periods.length;
     const span = { from: wave.t, to, rising: [...contacts, ...starts], falling: stops, tolerance: SOAK_TOLERANCE };
     const result = new Drift(circuit).run(wave.y[0]!, Float64Array.from(wave.y.subarray(1, 1 + circuit.count)), span);
     if (!result) return;
@@ -260,6 +260,7 @@ export class Follow {
     const { wave, circuit, periods } = this;
     const { tally } = wave;
     this.soaked.push({ from: wave.t, points, offset: { i2t: tally.i2t, source: tally.source, energy: Array.from(tally.body) } });
+    this.happenings.movedOn(t - wave.t);
     wave.jump(t);
     tally.i2t += i2t;
     tally.source += source;

@@ -6,6 +6,9 @@ import type { Scheduled, Watch, Waveform } from './waveform';
 /** An element has tripped when its resistance is this many times its value at the start (common practice). */
 export const TRIP_FACTOR = 10;
 
+/** Waits of the load that came to nothing, one after another with nothing between, after which all will. */
+const IN_VAIN = 8;
+
 /** What switches in a run: supply, load, contacts, fault, trips; each with its event. */
 export class Happenings {
   readonly events: RunEvent[] = [];
@@ -15,6 +18,7 @@ export class Happenings {
   firstClosing: { at: number; voltage: number } | null = null;
   private wave!: Waveform;
   private loadTimer: Scheduled | null = null;
+  private inVain = 0;
   private supplyGoing = false;
   private current: readonly Watch[] = [];
   private stale = true;
@@ -78,8 +82,27 @@ export class Happenings {
     return this.loadTimer !== null;
   }
 
+  /** Whether the load waits to start in every cycle and is stopped in every cycle before its delay is over. */
+  get loadWaitsInVain(): boolean {
+    return this.inVain >= IN_VAIN;
+  }
+
+  /** Instant of the next happening, s; a load that waits in vain is none. */
+  nextHappening(): number {
+    return this.wave.nextScheduled(this.loadWaitsInVain ? this.loadTimer : null);
+  }
+
+  /** To be told when time was moved on from a cycle into the same cycle later. */
+  movedOn(by: number): void {
+    if (!this.loadTimer || !this.loadWaitsInVain) return;
+    this.wave.unschedule(this.loadTimer);
+    this.loadTimer.at += by;
+    this.wave.schedule(this.loadTimer);
+  }
+
   private record(kind: RunEvent['kind'], at: number, element: number | null = null): void {
     this.events.push({ kind, at, element });
+    this.inVain = 0;
     this.stale = true;
   }
 
@@ -144,20 +167,21 @@ export class Happenings {
   }
 
   private startTimer(delay: number): void {
-    const at = this.wave.t + delay;
     this.stale = true;
-    this.loadTimer = {
-      at,
+    const timer: Scheduled = {
+      at: this.wave.t + delay,
       apply: () => {
         this.loadTimer = null;
-        this.circuit.loadSince = at;
-        this.record('load-starts', at);
+        this.circuit.loadSince = timer.at;
+        this.record('load-starts', timer.at);
       },
     };
-    this.wave.schedule(this.loadTimer);
+    this.loadTimer = timer;
+    this.wave.schedule(timer);
   }
 
   private stopLoad(): void {
+    if (this.loadTimer) this.inVain += 1;
     this.wave.unschedule(this.loadTimer);
     this.loadTimer = null;
     this.stale = true;

@@ -98,8 +98,8 @@ export class Waveform {
     this.h = frequency > 0 ? 1e-3 / frequency : 1e-5;
   }
 
-  nextScheduled(): number {
-    return this.scheduled[0]?.at ?? Infinity;
+  nextScheduled(besides: Scheduled | null = null): number {
+    return this.scheduled.find((one) => one !== besides)?.at ?? Infinity;
   }
 
   /** Integrates until `end`, or until a step or an event calls for a stop. */
