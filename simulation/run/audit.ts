@@ -54,7 +54,7 @@ const soakResidual = (run: Follow): Audit['soak'] => {
   });
   return {
     temperature: Math.max(...drift.map(Math.abs)),
-    rmsCurrent: Math.abs(rms - modelledRms) / Math.max(modelledRms, NEGLIGIBLE * highest),
+    rmsCurrent: Math.abs(rms - modelledRms) / Math.max(modelledRms, NEGLIGIBLE * highest, Number.MIN_VALUE),
   };
 };
 

@@ -38,8 +38,10 @@ interface Section {
 const SHORTEST = 60;
 /** Share of a threshold within which the waveform takes over. */
 const NEAR = 0.015;
-/** Change of the bus in one period, over the source amplitude, at which it no longer drifts. */
-const RESTS = 2e-6;
+/** Distance of the bus from where it comes to rest, over the source amplitude, at which it no longer drifts. */
+const RESTS = 5e-4;
+/** Time constants of the bus in one step. */
+const LONGEST = 4;
 const BUDGET = 600_000;
 const TOLERANCE = 1e-5;
 
@@ -51,6 +53,8 @@ const TOLERANCE = 1e-5;
 export class Drift {
   private readonly period: number;
   private missing = false;
+  /** Change of the bus in one period at the begin and at the end of the last step, V. */
+  private rates: [number, number] = [0, 0];
   private sides = 0;
 
   constructor(private readonly circuit: Circuit) {
@@ -105,15 +109,22 @@ export class Drift {
       }
       stepper.extrapolate();
       if (!this.accept(result, h, z, stepper, span)) break;
-      if (Math.abs(stepper.end[0]! - z[0]!) / (h / period) < RESTS * amplitude) {
-        z.set(stepper.end);
-        break;
-      }
       z.set(stepper.end);
-      h *= Math.min(3, Math.max(1, 0.9 * Math.max(error, 1e-9) ** -0.2));
+      const { distance, timeConstant } = this.relaxation(h);
+      if (distance < RESTS * amplitude) break;
+      h = Math.min(LONGEST * timeConstant, h * Math.min(3, Math.max(1, 0.9 * Math.max(error, 1e-9) ** -0.2)));
     }
     result.sides = this.sides;
     return result.points.length > 0 ? result : null;
+  }
+
+  /** How far the bus still is from its rest and how fast it gets there, from its rates at both ends of a step. */
+  private relaxation(h: number): { distance: number; timeConstant: number } {
+    const [before, after] = this.rates;
+    if (after === 0) return { distance: 0, timeConstant: Infinity };
+    const decay = Math.log(Math.abs(before / after));
+    const timeConstant = decay > 0 ? h / decay : Infinity;
+    return { distance: (Math.abs(after) / this.period) * timeConstant, timeConstant };
   }
 
   /** False where the step would pass something that happens on the waveform. */
@@ -123,6 +134,7 @@ export class Drift {
     if (!a || !b || !c) return false;
     if (span.rising.some((one) => a.row.highestBus < one && c.row.highestBus > (1 - NEAR) * one)) return false;
     if (span.falling.some((one) => a.row.lowestBus > one && c.row.lowestBus < (1 + NEAR) * one)) return false;
+    this.rates = [a.end[0]! - z[0]!, c.end[0]! - stepper.end[0]!];
     const mean = (pick: (section: Section) => number) => (h / 6) * (pick(a) + 4 * pick(b) + pick(c));
     result.i2t += mean(({ row }) => row.rms ** 2);
     result.source += mean(({ row }) => row.sourcePower);
