@@ -149,10 +149,11 @@ export class Circuit {
    */
   followingCurrent(y: Float64Array, t: number): number {
     const { capacitance, esr } = this.path.bulk;
-    const charging = capacitance * this.conduction * this.sourceSlope(t);
-    const bus = y[0]! + esr * charging;
-    const line = charging + this.loadCurrent(y[0]!, t) + this.busConductance() * bus;
-    const belongs = this.conduction * this.sourceVoltage(t) - this.drop - this.seriesResistance(y) * line - esr * charging;
+    const [series, conductance, drawn] = [this.seriesResistance(y), this.busConductance(), this.loadCurrent(y[0]!, t)];
+    const divided = 1 + series * conductance;
+    const charging = (capacitance * this.conduction * this.sourceSlope(t)) / divided;
+    const belongs = (this.conduction * this.sourceVoltage(t) - this.drop - series * (drawn + charging)) / divided - esr * charging;
+    const line = charging + drawn + conductance * (y[0]! + esr * charging);
     return line + (capacitance * (belongs - y[0]!)) / this.settling();
   }
 

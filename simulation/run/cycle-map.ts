@@ -12,6 +12,8 @@ const QUANTITIES = ['rms', 'peak', 'lowestBus', 'highestBus', 'sourcePower', 'ca
  */
 export class CycleMap {
   private readonly nodes = new Map<number, SteadyCycle>();
+  /** Nodes at which no cycle repeats. */
+  private readonly without = new Set<number>();
   private fits: Record<keyof SteadyCycle, MonotoneCubic> | null = null;
   private readonly origin: number;
 
@@ -28,16 +30,24 @@ export class CycleMap {
     if (this.options.path.source.kind === 'dc') return directBalance(this.options, resistance);
     const x = (Math.log(Math.max(resistance, 1e-6)) - this.origin) / Math.log(RATIO);
     const left = Math.floor(x + 1e-9);
-    for (let k = left - 1; k <= left + 2; k += 1) if (!this.solve(k)) return null;
+    if (!this.solve(left)) return null;
+    // The resistance may stand on a node, and the next one may already be where the load has no balance.
+    if (x - left < 1e-6) return this.nodes.get(left)!;
+    if (!this.solve(left + 1)) return null;
+    [left - 1, left + 2].forEach((k) => this.solve(k));
     const fits = (this.fits ??= this.fit());
     return Object.fromEntries(QUANTITIES.map((name) => [name, fits[name].value(x)])) as unknown as SteadyCycle;
   }
 
   private solve(k: number): boolean {
     if (this.nodes.has(k)) return true;
+    if (this.without.has(k)) return false;
     const nearest = [...this.nodes.entries()].sort(([a], [b]) => Math.abs(a - k) - Math.abs(b - k))[0];
     const found = steadyCycle(this.options, Math.exp(this.origin + k * Math.log(RATIO)), nearest?.[1].capacitorVoltage ?? this.guess);
-    if (!found) return false;
+    if (!found) {
+      this.without.add(k);
+      return false;
+    }
     this.nodes.set(k, found);
     this.fits = null;
     return true;
