@@ -1,7 +1,8 @@
 import type { RunEvent } from '../../shared/model/result';
 import type { Circuit } from '../circuit/circuit';
+import type { Watch } from './crossing';
 import type { StartState } from './options';
-import type { Scheduled, Watch, Waveform } from './waveform';
+import type { Scheduled, Waveform } from './waveform';
 
 /** An element has tripped when its resistance is this many times its value at the start (common practice). */
 export const TRIP_FACTOR = 10;
@@ -33,6 +34,7 @@ export class Happenings {
 
   begin(wave: Waveform, start: StartState | undefined): void {
     this.wave = wave;
+    wave.onBlocked = () => this.openIfBlocked();
     this.record('switch-on', 0);
     start?.contactsClosedFor.forEach((time, k) => {
       if (time === null || this.circuit.path.elements[k]?.bypass?.behaviour === 'never-closes') return;

@@ -1,18 +1,11 @@
 import type { Circuit, Conduction } from '../circuit/circuit';
 import { DoubledStep } from '../solver/doubled-step';
-import { rootBetween } from '../solver/root';
+import { earliestCrossing, INSTANT, type Watch } from './crossing';
 import { Tally } from './tally';
 
 /** Something that happens at a known time. */
 export interface Scheduled {
   at: number;
-  apply: () => void;
-}
-
-/** Something that happens where a value passes zero in the given direction. */
-export interface Watch {
-  value: (y: Float64Array, t: number) => number;
-  rising: boolean;
   apply: () => void;
 }
 
@@ -25,8 +18,6 @@ export interface WaveformOptions {
 /** Told of every accepted step. */
 export type OnStep = (wave: Waveform, from: number, h: number) => void;
 
-/** s; two instants closer than this are one. */
-const INSTANT = 1e-12;
 const SIDES_PER_STEP = 12;
 /** Steps after which a hard start is over. */
 const SEVERAL = 100;
@@ -46,6 +37,8 @@ export class Waveform {
   private readonly slope: Float64Array;
   sides = 0;
   everInductive = false;
+  /** Told of every end of a conduction, also where the next one follows at once. */
+  onBlocked: () => void = () => undefined;
   stoppedAs: 'step-too-small' | 'step-budget' | null = null;
   readonly tally: Tally;
   private h: number;
@@ -208,8 +201,9 @@ export class Waveform {
       h *= Math.max(0.1, 0.9 * error ** -0.25);
       if (!(h > 1e-14 * Math.max(1, this.t))) return this.stop('step-too-small');
     }
-    const found = this.earliestEvent(h);
+    const found = earliestCrossing([...this.conductionWatch(), ...this.watches()], { stepper, before, t: this.t, h });
     if (found) {
+      this.sides += found.sides;
       h = found.at;
       stepper.take(before, this.t, h);
       this.sides += SIDES_PER_STEP;
@@ -246,33 +240,6 @@ export class Waveform {
     this.onStep(this, from, h);
   }
 
-  /** Watches that pass zero within the step; the earliest of them, or several at one instant. */
-  private earliestEvent(h: number): { at: number; all: (() => void)[] } | null {
-    const crossed = [...this.conductionWatch(), ...this.watches()].flatMap((watch) => {
-      const sign = watch.rising ? 1 : -1;
-      const middle = sign * watch.value(this.stepper.middle, this.t + h / 2);
-      const start = sign * watch.value(this.before, this.t);
-      // A current that has just begun is zero: it may rise first and end within the step.
-      if (start > 0 || (start === 0 && middle >= 0)) return [];
-      if (middle >= 0) return [{ watch, low: 0, high: h / 2 }];
-      return sign * watch.value(this.stepper.end, this.t + h) >= 0 ? [{ watch, low: h / 2, high: h }] : [];
-    });
-    if (crossed.length === 0) return null;
-    const roots = crossed.map(({ watch, low, high }) => ({ watch, at: this.locate(watch, low, high) }));
-    const at = Math.min(...roots.map((one) => one.at));
-    return { at, all: roots.filter((one) => one.at <= at + INSTANT).map((one) => one.watch.apply) };
-  }
-
-  private locate({ value }: Watch, low: number, high: number): number {
-    const { before, t, stepper } = this;
-    const passes = (h: number): number => {
-      if (h <= 0) return value(before, t);
-      this.sides += 4;
-      return value(stepper.single(before, t, h), t + h);
-    };
-    return rootBetween(passes, low, high, Math.max(1e-13, 1e-8 * high));
-  }
-
   private conductionWatch(): Watch[] {
     const { circuit } = this;
     if (!circuit.bridge || !circuit.supplied) return [];
@@ -289,6 +256,7 @@ export class Waveform {
         apply: () => {
           circuit.conduction = 0;
           this.y[last] = 0;
+          this.onBlocked();
         },
       },
     ];
