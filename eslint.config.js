@@ -85,6 +85,8 @@ module.exports = defineConfig([
   { files: ['server/bin/**', 'tests/support/*.mjs', 'tests/bench/**'], rules: { 'no-console': 'off' } },
   { files: ['**/*.{mjs,cjs}', '*.config.js', 'server/bin/*.js', '.dependency-cruiser.cjs'], languageOptions: { globals: NODE_GLOBALS } },
   pureEngine,
+  // A package without types of its own is described as it is.
+  { files: ['**/*.d.ts'], rules: { 'no-restricted-syntax': 'off' } },
 
   importsOf('app', ...noServer),
   importsOf('components', ...noServer, refuseFolders('app', 'Imports run down: app → components.')),

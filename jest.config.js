@@ -40,6 +40,5 @@ module.exports = {
     },
     node('e2e', withCluster),
     node('architecture'),
-    node('drills'),
   ],
 };

@@ -1,7 +1,6 @@
 import type { Run } from '../../shared/model/result';
 import { moved, type Levels } from './levels';
 import { cooled, dischargedBus } from './off-state';
-import { searchSteady } from './steady';
 import type { Trials } from './trials';
 import type { StartState } from '../run/options';
 

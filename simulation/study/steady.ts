@@ -1,7 +1,6 @@
-import { deratedCurrent } from '../checks/limiter-steady-current';
 import { fuseSteadyCurrentCheck } from '../checks/fuse-steady-current';
 import { limiterLossCheck } from '../checks/limiter-loss';
-import { limiterSteadyCurrentCheck } from '../checks/limiter-steady-current';
+import { deratedCurrent, limiterSteadyCurrentCheck } from '../checks/limiter-steady-current';
 import { limiterSteadyTemperatureCheck } from '../checks/limiter-steady-temperature';
 import type { Part } from '../../shared/model/part';
 import { applies } from './applicable';
