@@ -25,6 +25,9 @@ const WORTHWHILE = 6;
 const PATIENCE = 10;
 /** Periods that are left to the waveform at the end of a drift. */
 const LAST = 8;
+/** Share of its resistance that an element may ripple in a soak, and cycles that are rather followed one by one. */
+const RIPPLE = 0.02;
+const AFFORDABLE = 4000;
 /** Share of the amplitude by which the bus may miss the repeating cycle. */
 const SETTLED = 2e-3;
 
@@ -185,7 +188,17 @@ export class Follow {
     const { wave, periods, circuit, happenings, options } = this;
     const soon = wave.t + WORTHWHILE * periods.length;
     if (!circuit.supplied || happenings.supplyGoesOff || wave.t < this.waitUntil || !periods.repeats) return false;
-    return soon < Math.min(happenings.nextHappening(), options.duration) && this.isCalm();
+    const until = Math.min(happenings.nextHappening(), options.duration);
+    return soon < until && this.isCalm() && !(this.ripples() && (until - wave.t) / periods.length < AFFORDABLE);
+  }
+
+  /** Whether a resistance moves so much within one cycle that averaging over it would tell in the temperature. */
+  private ripples(): boolean {
+    const row = this.periods.rows[this.periods.rows.length - 1]!;
+    return this.path.elements.some(({ law, heatCapacity }, k) => {
+      const [temperature, swing] = [row.temperature[k]!, (row.bodyPower[k]! * this.periods.length) / heatCapacity];
+      return this.path.source.kind === 'ac' && Math.abs(swing * law.slope(temperature)) > RIPPLE * law.resistance(temperature);
+    });
   }
 
   private isCalm(): boolean {
