@@ -52,6 +52,7 @@ export class Follow {
   readonly bypass = { closedAt: null as number | null, voltage: null as number | null, peak: null as number | null };
   underLoad = { start: null as number | null, lowest: Infinity, ended: false };
   trip = { reference: 0, at: null as number | null, i2t: 0, energy: 0, from: 0, fromI2t: 0, fromEnergy: 0 };
+  private readonly budget: number;
   private waitUntil = 0;
   private known = 0;
 
@@ -59,12 +60,13 @@ export class Follow {
     readonly path: PowerPath,
     readonly options: RunOptions,
   ) {
+    this.budget = options.waveformOnly ? Infinity : BUDGET;
     this.circuit = new Circuit(path);
     this.startTemperatures = [...(options.start?.temperatures ?? path.elements.map(() => path.ambient))];
     const y = Float64Array.of(options.start?.busVoltage ?? path.bulk.initialVoltage, ...this.startTemperatures, 0);
     this.hottest = [...this.startTemperatures];
     this.happenings = new Happenings(this.circuit, this.startTemperatures);
-    const limits = { tolerance: options.tolerance ?? TOLERANCE, budget: BUDGET };
+    const limits = { tolerance: options.tolerance ?? TOLERANCE, budget: this.budget };
     this.wave = new Waveform(this.circuit, { t: 0, y }, limits, this.happenings.watches, this.onStep);
     this.happenings.begin(this.wave, options.start);
     this.periods = new Periods(this.wave);
@@ -76,12 +78,24 @@ export class Follow {
   private run(): void {
     const { wave, periods, options } = this;
     while (wave.t < options.duration - 1e-9 && !wave.stoppedAs && !this.finished()) {
-      const boundary = this.circuit.supplied ? periods.next(wave.t) : Math.max(periods.next(wave.t), wave.nextScheduled());
+      const boundary = this.idles() ? Math.max(periods.next(wave.t), wave.nextScheduled()) : periods.next(wave.t);
       this.balanced(() => wave.run(Math.min(boundary, options.duration), () => this.finished()));
       if (wave.t >= boundary - 1e-12 || wave.t >= options.duration - 1e-9) periods.cut();
       if (!options.waveformOnly && this.readyToSoak() && !this.soak()) this.drift();
-      if (wave.sides + this.soakSides > BUDGET) wave.stoppedAs = 'step-budget';
+      if (wave.sides + this.soakSides > this.budget) wave.stoppedAs = 'step-budget';
     }
+  }
+
+  /** Nothing comes in, nor will before something switches: no cycle to look at. */
+  private idles(): boolean {
+    const { circuit } = this;
+    return !circuit.supplied || (this.path.source.kind === 'dc' && circuit.bridge && circuit.conduction === 0);
+  }
+
+  /** A load that still ramps up makes no cycle that repeats. */
+  private ramps(): boolean {
+    const { circuit, path, wave } = this;
+    return path.load.kind === 'constant-power' && circuit.loadSince !== null && wave.t < circuit.loadSince + path.load.rampTime;
   }
 
   private finished(): boolean {
@@ -187,7 +201,7 @@ export class Follow {
   private readyToSoak(): boolean {
     const { wave, periods, circuit, happenings, options } = this;
     const soon = wave.t + WORTHWHILE * periods.length;
-    if (!circuit.supplied || happenings.supplyGoesOff || wave.t < this.waitUntil || !periods.repeats) return false;
+    if (!circuit.supplied || happenings.supplyGoesOff || wave.t < this.waitUntil || !periods.repeats || this.ramps()) return false;
     const until = Math.min(happenings.nextHappening(), options.duration);
     return soon < until && this.isCalm() && !(this.ripples() && (until - wave.t) / periods.length < AFFORDABLE);
   }

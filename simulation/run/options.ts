@@ -17,6 +17,6 @@ export interface RunOptions {
   tolerance?: number;
   /** Traces cost time; a study that needs none leaves them out (empty series). Default true. */
   traces?: boolean;
-  /** Never leave the waveform scale; for the audit and the benchmark. Default false. */
+  /** Never leave the waveform scale, however many steps it takes; for the benchmark and tests. Default false. */
   waveformOnly?: boolean;
 }
