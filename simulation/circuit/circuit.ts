@@ -157,6 +157,11 @@ export class Circuit {
     return line + (capacitance * (belongs - y[0]!)) / this.settling();
   }
 
+  /** Voltage by which a following bus misses Kirchhoff's law, V: it lags where R(T) moves faster than it settles. */
+  followingLag(y: Float64Array, t: number): number {
+    return (this.seriesResistance(y) + this.path.bulk.esr) * Math.abs(this.drivenCurrent(y, t) - this.followingCurrent(y, t));
+  }
+
   /** Time constant of the bus behind a resistance, with what lies across it, s. */
   private chargingTime(resistance: number): number {
     return (resistance * this.path.bulk.capacitance) / (1 + resistance * this.busConductance());

@@ -10,6 +10,7 @@ import type { RunOptions } from './options';
 import { Periods } from './periods';
 import { Soak, type SoakPoint } from './soak';
 import type { SteadyCycle } from './steady-cycle';
+import { TripRecord } from './trip-record';
 import { Waveform } from './waveform';
 
 /** s; where the plot folds from the waveform to the soak. */
@@ -25,6 +26,8 @@ const WORTHWHILE = 6;
 const PATIENCE = 10;
 /** Periods that are left to the waveform at the end of a drift. */
 const LAST = 8;
+/** s; longest look at a DC path that is blocked. */
+const IDLE = 1;
 /** Share of its resistance that an element may ripple in a soak, and cycles that are rather followed one by one. */
 const RIPPLE = 0.02;
 const AFFORDABLE = 4000;
@@ -51,7 +54,7 @@ export class Follow {
   readonly hottest: number[];
   readonly bypass = { closedAt: null as number | null, voltage: null as number | null, peak: null as number | null };
   underLoad = { start: null as number | null, lowest: Infinity, ended: false };
-  trip = { reference: 0, at: null as number | null, i2t: 0, energy: 0, from: 0, fromI2t: 0, fromEnergy: 0 };
+  readonly trip: TripRecord;
   private readonly budget: number;
   private waitUntil = 0;
   private known = 0;
@@ -72,13 +75,14 @@ export class Follow {
     this.periods = new Periods(this.wave);
     this.history = new History(this.wave);
     this.pulse = new FirstPulse(this.wave);
+    this.trip = new TripRecord(this.wave, this.periods);
     this.run();
   }
 
   private run(): void {
     const { wave, periods, options } = this;
     while (wave.t < options.duration - 1e-9 && !wave.stoppedAs && !this.finished()) {
-      const boundary = this.idles() ? Math.max(periods.next(wave.t), wave.nextScheduled()) : periods.next(wave.t);
+      const boundary = Math.max(periods.next(wave.t), Math.min(this.idleUntil(), wave.nextScheduled()));
       this.balanced(() => wave.run(Math.min(boundary, options.duration), () => this.finished()));
       if (wave.t >= boundary - 1e-12 || wave.t >= options.duration - 1e-9) periods.cut();
       if (!options.waveformOnly && this.readyToSoak() && !this.soak()) this.drift();
@@ -86,10 +90,11 @@ export class Follow {
     }
   }
 
-  /** Nothing comes in, nor will before something switches: no cycle to look at. */
-  private idles(): boolean {
-    const { circuit } = this;
-    return !circuit.supplied || (this.path.source.kind === 'dc' && circuit.bridge && circuit.conduction === 0);
+  /** While nothing comes in there is no cycle to look at; a bus above a DC supply may fall below it again. */
+  private idleUntil(): number {
+    const { circuit, wave, path } = this;
+    if (!circuit.supplied) return Infinity;
+    return path.source.kind === 'dc' && circuit.bridge && circuit.drive(wave.y, wave.t, 1) < 0 ? wave.t + IDLE : 0;
   }
 
   /** A load that still ramps up makes no cycle that repeats. */
@@ -133,7 +138,7 @@ export class Follow {
     this.followEvents();
     this.followBypass();
     this.followLoad();
-    this.followTrip();
+    this.trip.byCurrent();
     happenings.openIfBlocked();
   };
 
@@ -161,15 +166,9 @@ export class Follow {
         this.underLoad.lowest = Math.min(this.underLoad.lowest, wave.tally.end.bus);
         this.hiccups = events.filter((one) => one.kind === 'load-stops').length >= HICCUPS && this.circuit.supplied;
       }
-      if (event.kind === 'fault-begins')
-        Object.assign(this.trip, { from: event.at, fromI2t: wave.tally.i2t, fromEnergy: wave.tally.body[0] ?? 0, reference: 0 });
-      if (event.kind === 'trips' && this.trip.at === null && !this.path.fault) this.noteTrip();
+      if (event.kind === 'fault-begins') this.trip.faultBegins(event.at);
+      if (event.kind === 'trips') this.trip.byResistance();
     }
-  }
-
-  private noteTrip(): void {
-    const { tally, t } = this.wave;
-    Object.assign(this.trip, { at: t, i2t: tally.i2t - this.trip.fromI2t, energy: (tally.body[0] ?? 0) - this.trip.fromEnergy });
   }
 
   private followBypass(): void {
@@ -186,16 +185,6 @@ export class Follow {
   private followLoad(): void {
     if (this.circuit.loadSince === null || this.underLoad.ended) return;
     this.underLoad.lowest = Math.min(this.underLoad.lowest, this.wave.tally.end.bus);
-  }
-
-  /** On a step fault a PTC has tripped when the current is below half of what it was when the fault began. */
-  private followTrip(): void {
-    const { trip, path, wave, circuit } = this;
-    if (!circuit.faulted || trip.at !== null || !path.elements.some(({ kind }) => kind === 'polymer-ptc')) return;
-    const rows = this.periods.rows;
-    const line = path.source.kind === 'dc' ? Math.abs(wave.tally.end.line) : (rows[rows.length - 1]?.start ?? -1) >= trip.from ? rows[rows.length - 1]!.rms : 0;
-    trip.reference = Math.max(trip.reference, line);
-    if (line > 0 && line < trip.reference / 2) this.noteTrip();
   }
 
   private readyToSoak(): boolean {
@@ -252,13 +241,8 @@ export class Follow {
   private drift(): void {
     const { wave, circuit, periods, happenings, options, path } = this;
     if (path.source.kind === 'dc' || circuit.conduction !== 0) return;
-    const { load, elements } = path;
-    const contacts = elements.flatMap(({ bypass }, k) => (bypass?.closes.when === 'bus-voltage' && bypass.behaviour === 'works' && !circuit.closed[k] ? [bypass.closes.above] : []));
-    const loadRuns = circuit.loadSince !== null;
-    const starts = load.kind === 'constant-power' && !loadRuns && !happenings.loadPending ? [load.startVoltage] : [];
-    const stops = load.kind === 'constant-power' && (loadRuns || happenings.loadPending) ? [load.stopVoltage] : [];
     const to = Math.min(happenings.nextHappening(), options.duration) - LAST * periods.length;
-    const span = { from: wave.t, to, rising: [...contacts, ...starts], falling: stops, tolerance: SOAK_TOLERANCE };
+    const span = { from: wave.t, to, ...happenings.thresholds(), tolerance: SOAK_TOLERANCE };
     const result = new Drift(circuit).run(wave.y[0]!, Float64Array.from(wave.y.subarray(1, 1 + circuit.count)), span);
     if (!result) return;
     this.soakSides += result.sides;

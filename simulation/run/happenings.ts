@@ -84,6 +84,18 @@ export class Happenings {
     return this.loadTimer !== null;
   }
 
+  /** Bus voltages that something happens at on the way up and on the way down, V. */
+  thresholds(): { rising: number[]; falling: number[] } {
+    const { circuit } = this;
+    const { load, elements } = circuit.path;
+    const contacts = elements.flatMap(({ bypass }, k) =>
+      bypass?.closes.when === 'bus-voltage' && bypass.behaviour === 'works' && !circuit.closed[k] ? [bypass.closes.above] : [],
+    );
+    if (load.kind !== 'constant-power') return { rising: contacts, falling: [] };
+    const runsOrWaits = circuit.loadSince !== null || this.loadPending;
+    return runsOrWaits ? { rising: contacts, falling: [load.stopVoltage] } : { rising: [...contacts, load.startVoltage], falling: [] };
+  }
+
   /** Whether the load waits to start in every cycle and is stopped in every cycle before its delay is over. */
   get loadWaitsInVain(): boolean {
     return this.inVain >= IN_VAIN;

@@ -19,6 +19,8 @@ export interface WaveformOptions {
 export type OnStep = (wave: Waveform, from: number, h: number) => void;
 
 const SIDES_PER_STEP = 12;
+/** Share of the source amplitude that a following bus may lag. */
+const LAG = 2e-3;
 /** Steps after which a hard start is over. */
 const SEVERAL = 100;
 /** Share of the source amplitude within which a driving voltage counts as zero. */
@@ -113,7 +115,8 @@ export class Waveform {
     if (circuit.conduction === 0) return;
     this.steps += 1;
     if (circuit.inductive) this.reconsiderInductance(this.steps % SEVERAL !== 0);
-    else circuit.follows ||= circuit.mayFollow(y, t);
+    else if (!circuit.follows) circuit.follows = circuit.mayFollow(y, t);
+    else if (circuit.followingLag(y, t) > LAG * circuit.path.source.amplitude) circuit.follows = false;
   }
 
   private applyDue(): void {
