@@ -18,7 +18,8 @@ interface Ending {
 
 const endingOf = (run: Follow): Ending | null => {
   if (run.endCycle) return run.endCycle;
-  const rows = run.periods.rows.slice(-2);
+  // The run may end within a half period: the last full cycle counts.
+  const rows = run.periods.rows.filter(({ start, end }) => end - start > 0.999 * run.periods.length).slice(-2);
   if (rows.length < 2 || run.options.stopAt) return null;
   const mean = (pick: (row: Period) => number) => (pick(rows[0]!) + pick(rows[1]!)) / 2;
   return {
