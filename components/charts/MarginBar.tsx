@@ -92,7 +92,7 @@ export const MarginBar = ({ check, variant = 'full', stale = false, silent = fal
   const grey = stale || check.setAside !== null;
   const color = grey ? colors.quiet : colors[STATUS_COLOR[check.status]];
   const worst = check.ratio === null ? null : along(check.ratio);
-  const label = silent ? { 'aria-hidden': true } : ({ role: 'img', 'aria-label': spoken(check) } as const);
+  const label = silent ? { 'aria-hidden': true } : ({ role: 'img', accessible: true, 'aria-label': spoken(check) } as const);
   return (
     <View {...label} style={{ height, minWidth: 40 }}>
       {worst === null ? <Hatch color={colors.rule2} bar={bar} /> : null}

@@ -77,11 +77,11 @@ const PartBody = ({ record }: { record: PartRecord }) => {
       <HotSurface {...record} />
     </>
   );
-  if (!wide) return <ScrollView contentContainerStyle={column}><Approval {...record} />{left}{right}</ScrollView>;
+  if (!wide) return <ScrollView tabIndex={0} contentContainerStyle={column}><Approval {...record} />{left}{right}</ScrollView>;
   return (
     <View style={{ flex: 1, flexDirection: 'row' }}>
-      <ScrollView style={{ flex: 1.1, borderRightWidth: 1, borderRightColor: colors.rule2 }} contentContainerStyle={column}>{left}</ScrollView>
-      <ScrollView style={{ flex: 1 }} contentContainerStyle={column}>{right}</ScrollView>
+      <ScrollView tabIndex={0} style={{ flex: 1.1, borderRightWidth: 1, borderRightColor: colors.rule2 }} contentContainerStyle={column}>{left}</ScrollView>
+      <ScrollView tabIndex={0} style={{ flex: 1 }} contentContainerStyle={column}>{right}</ScrollView>
     </View>
   );
 };

@@ -17,13 +17,15 @@ const workedDemo = (scenarios: readonly ScenarioSummary[]) =>
 const FirstScenario = ({ userId }: { userId: string }) => {
   const { data: scenarios, error, refetch } = useScenarios('');
   const [first] = useState(() => !wasWelcomed(userId));
+  const demo = workedDemo(scenarios ?? []);
+  // On a fresh start the verdicts are still being computed; the list asks again until they are there.
+  const known = demo !== undefined || (scenarios?.every(({ verdict }) => verdict !== null) ?? false);
   useEffect(() => {
-    if (scenarios) markWelcomed(userId);
-  }, [scenarios, userId]);
+    if (known) markWelcomed(userId);
+  }, [known, userId]);
   if (!first) return <Redirect href="/scenarios" />;
   if (error) return <Notice kind="error" title="Not opened" action={{ label: 'Try again', onPress: () => void refetch() }}>{errorSentence(error)}</Notice>;
-  if (!scenarios) return <Text tone="quiet" role="status">Opening</Text>;
-  const demo = workedDemo(scenarios);
+  if (!known) return <Text tone="quiet" role="status">Opening: the first verdicts are being computed</Text>;
   return <Redirect href={demo ? `/scenarios/${demo.id}` : '/scenarios'} />;
 };
 

@@ -19,7 +19,7 @@ export const TickProgress = ({ label, done, total, onCancel }: TickProgressProps
   return (
     <View style={{ gap: 8, alignItems: 'flex-start' }}>
       <Text strong role="status">{label}</Text>
-      <View role="progressbar" aria-label={label} aria-valuemin={0} aria-valuemax={total} aria-valuenow={done} style={{ flexDirection: 'row', alignItems: 'flex-end', gap: 2, height: 14, width: '100%', maxWidth: total * 12 }}>
+      <View accessible role="progressbar" aria-label={label} aria-valuemin={0} aria-valuemax={total} aria-valuenow={done} style={{ flexDirection: 'row', alignItems: 'flex-end', gap: 2, height: 14, width: '100%', maxWidth: total * 12 }}>
         {Array.from({ length: total }, (_, index) => (
           <View key={index} style={{ flex: 1, height: index < done ? 14 : index % 12 === 0 ? 10 : 6, backgroundColor: index < done ? colors.ink : colors.rule2 }} />
         ))}

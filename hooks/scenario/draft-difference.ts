@@ -1,3 +1,5 @@
+import { hashKey } from '@tanstack/react-query';
+
 import { isBranch, nodeAt, withNode, type Draft, type DraftNode } from './draft-tree';
 
 export interface Difference {
@@ -11,7 +13,8 @@ export interface Difference {
 /** Fields that only have a meaning together: another of these makes another block. */
 const KIND_KEYS = ['kind', 'law', 'when'] as const;
 
-const same = (one: DraftNode, other: DraftNode) => JSON.stringify(one) === JSON.stringify(other);
+/** Whatever the order of the keys, which the database does not keep. */
+const same = (one: DraftNode, other: DraftNode) => hashKey([one]) === hashKey([other]);
 const isBand = (node: Draft) => 'nominal' in node;
 const sameKind = (one: Draft, other: Draft) => KIND_KEYS.every((key) => typeof one[key] === 'object' || one[key] === other[key]);
 

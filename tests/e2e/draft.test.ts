@@ -67,12 +67,12 @@ describe('A draft', () => {
     const { page } = await enter();
     await openScenario(page, app.url, /Meter supply/);
     await openBlock(page, /^Bulk capacitor/);
-    await page.getByLabel('Voltage before switch-on').fill('12 x');
+    await page.getByLabel('Voltage before switch-on', { exact: true }).fill('12 x');
     page.on('dialog', (dialog) => void dialog.accept());
     await page.reload();
     await openBlock(page, /^Bulk capacitor/);
-    expect(await page.getByLabel('Voltage before switch-on').inputValue()).toBe('12 x');
-    await page.getByLabel('Voltage before switch-on').fill('12');
+    expect(await page.getByLabel('Voltage before switch-on', { exact: true }).inputValue()).toBe('12 x');
+    await page.getByLabel('Voltage before switch-on', { exact: true }).fill('12');
     await saved(page);
   }, 60_000);
 
@@ -83,15 +83,15 @@ describe('A draft', () => {
     await second.page.goto(first.page.url());
     await openBlock(first.page, /^Bulk capacitor/);
     await openBlock(second.page, /^Bulk capacitor/);
-    await second.page.getByLabel('Voltage before switch-on').fill('2');
+    await second.page.getByLabel('Voltage before switch-on', { exact: true }).fill('2');
     await saved(second.page);
-    await first.page.getByLabel('Voltage before switch-on').fill('3');
+    await first.page.getByLabel('Voltage before switch-on', { exact: true }).fill('3');
     await first.page.getByText(/saved this scenario at/).waitFor();
     await first.page.getByRole('button', { name: 'Compare' }).click();
     await first.page.getByText('mine 3 V, theirs 2 V').waitFor();
     await first.page.getByRole('radio', { name: 'Theirs' }).click();
     await first.page.getByRole('button', { name: 'Go on with these' }).click();
     await saved(first.page);
-    expect(await first.page.getByLabel('Voltage before switch-on').inputValue()).toBe('2');
+    expect(await first.page.getByLabel('Voltage before switch-on', { exact: true }).inputValue()).toBe('2');
   }, 60_000);
 });

@@ -23,13 +23,13 @@ const readCounts = (file) => {
 };
 
 /** One project of jest.config.js. No test at all counts as a failure, and so does one that is left out. */
-const jest = (name, needs = []) => ({
+const jest = (name, needs = [], more = []) => ({
   name,
   needs,
   run: async () => {
     const file = local(`results-${name}.json`);
     rmSync(file, { force: true });
-    const status = await runChild(bin('jest'), ['--selectProjects', name, '--json', `--outputFile=${file}`, '--testLocationInResults=false'], {
+    const status = await runChild(bin('jest'), ['--selectProjects', name, '--json', `--outputFile=${file}`, '--testLocationInResults=false', ...more], {
       stdio: ['ignore', 'ignore', 'inherit'],
     });
     const counts = readCounts(file);
@@ -48,5 +48,6 @@ export const STAGES = [
   jest('validation'),
   jest('components'),
   jest('api', ['cluster']),
-  jest('e2e', ['cluster', 'client', 'chromium']),
+  // One after the other: each starts a server with its own worker threads, and two cores are soon full.
+  jest('e2e', ['cluster', 'client', 'chromium'], ['--runInBand']),
 ];

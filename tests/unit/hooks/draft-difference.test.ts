@@ -23,6 +23,11 @@ describe('two people’s versions of one draft', () => {
     expect(differencesBetween(base, theirs, theirs)).toEqual([]);
   });
 
+  it('do not differ where only the order of the keys does', () => {
+    const reordered = withNode(base, 'bulk.capacitance', Object.fromEntries(Object.entries(nodeAt(base, 'bulk.capacitance') as object).reverse()));
+    expect(differencesBetween(base, base, reordered)).toEqual([]);
+  });
+
   it('differ as a whole in a band and in a block of another kind', () => {
     const other = withNode(withNode(base, 'bulk.capacitance', { nominal: 330e-6, min: 330e-6, max: 330e-6 }), 'load', { kind: 'none' });
     expect(differencesBetween(base, base, other).map(({ path }) => path).sort()).toEqual(['bulk.capacitance', 'load']);
