@@ -160,7 +160,7 @@ export class Follow {
       const { wave } = this;
       // What happens after the last soak makes another cycle.
       this.endCycle = null;
-      if (event.kind === 'load-starts' && this.underLoad.start === null) this.underLoad.start = wave.tally.end.bus;
+      if (event.kind === 'load-starts' && this.underLoad.start === null) this.underLoad.start = wave.tally.start.bus;
       if (event.kind === 'load-stops') {
         this.underLoad.ended = true;
         this.underLoad.lowest = Math.min(this.underLoad.lowest, wave.tally.end.bus);
