@@ -30,7 +30,14 @@ export class Circuit {
   readonly closed: boolean[];
   private readonly drop: number;
   private readonly slope: number;
+  private readonly amplitude: number;
+  private readonly phase: number;
+  /** rad/s; 0 for DC. */
   private readonly omega: number;
+  private readonly steadyConductance: number;
+  /** R(T) is asked for several times at one instant: the last answer of each element is kept. */
+  private readonly knownTemperature: Float64Array;
+  private readonly knownResistance: Float64Array;
 
   constructor(readonly path: PowerPath) {
     const { rectifier, source } = path;
@@ -39,26 +46,39 @@ export class Circuit {
     this.bridge = rectifier.kind === 'bridge';
     this.drop = rectifier.kind === 'bridge' ? 2 * rectifier.forwardVoltage : 0;
     this.slope = rectifier.kind === 'bridge' ? 2 * rectifier.slopeResistance : 0;
-    this.omega = 2 * Math.PI * source.frequency;
+    this.amplitude = source.amplitude;
+    this.phase = source.phase;
+    this.omega = source.kind === 'dc' ? 0 : 2 * Math.PI * source.frequency;
     this.inductive = source.inductance > 0;
     this.closed = path.elements.map(({ bypass }) => bypass?.behaviour === 'welded');
+    this.knownTemperature = new Float64Array(this.count).fill(NaN);
+    this.knownResistance = new Float64Array(this.count);
+    const { bulk, load } = path;
+    this.steadyConductance = (bulk.bleeder === null ? 0 : 1 / bulk.bleeder) + (load.kind === 'resistance' ? 1 / load.resistance : 0);
+  }
+
+  /** Resistance of one body, Ω. */
+  private bodyResistance(index: number, temperature: number): number {
+    if (this.knownTemperature[index] !== temperature) {
+      this.knownTemperature[index] = temperature;
+      this.knownResistance[index] = this.path.elements[index]!.law.resistance(temperature);
+    }
+    return this.knownResistance[index]!;
   }
 
   /** Source voltage, V; zero while the supply is off. */
   sourceVoltage(t: number): number {
     if (!this.supplied) return 0;
-    const { kind, amplitude, phase } = this.path.source;
-    return kind === 'dc' ? amplitude : amplitude * Math.sin(this.omega * t + phase);
+    return this.omega === 0 ? this.amplitude : this.amplitude * Math.sin(this.omega * t + this.phase);
   }
 
   sourceSlope(t: number): number {
-    const { kind, amplitude, phase } = this.path.source;
-    return kind === 'dc' || !this.supplied ? 0 : amplitude * this.omega * Math.cos(this.omega * t + phase);
+    return this.omega === 0 || !this.supplied ? 0 : this.amplitude * this.omega * Math.cos(this.omega * t + this.phase);
   }
 
   /** Resistance that the line current meets in one element, contact included, Ω. */
   private lineResistance(element: PathElement, index: number, temperature: number): number {
-    const body = element.law.resistance(temperature);
+    const body = this.bodyResistance(index, temperature);
     if (!this.closed[index]) return body;
     const contact = element.bypass!.contactResistance;
     return (body * contact) / (body + contact);
@@ -93,21 +113,18 @@ export class Circuit {
     if (!this.closed[index]) return line;
     const element = this.path.elements[index]!;
     const contact = element.bypass!.contactResistance;
-    return (line * contact) / (contact + element.law.resistance(y[1 + index]!));
+    return (line * contact) / (contact + this.bodyResistance(index, y[1 + index]!));
   }
 
   bodyPower(index: number, y: Float64Array, line: number): number {
     const current = this.bodyCurrent(index, y, line);
-    return current * current * this.path.elements[index]!.law.resistance(y[1 + index]!);
+    return current * current * this.bodyResistance(index, y[1 + index]!);
   }
 
   /** Conductances across the bus, S. */
   busConductance(): number {
-    const { bulk, load, fault } = this.path;
-    let sum = bulk.bleeder === null ? 0 : 1 / bulk.bleeder;
-    if (load.kind === 'resistance') sum += 1 / load.resistance;
-    if (this.faulted && fault) sum += 1 / fault.resistance;
-    return sum;
+    const { fault } = this.path;
+    return this.faulted && fault ? this.steadyConductance + 1 / fault.resistance : this.steadyConductance;
   }
 
   /** Current that the running constant-power load draws, A. */
@@ -149,7 +166,9 @@ export class Circuit {
    */
   followingCurrent(y: Float64Array, t: number): number {
     const { capacitance, esr } = this.path.bulk;
-    const [series, conductance, drawn] = [this.seriesResistance(y), this.busConductance(), this.loadCurrent(y[0]!, t)];
+    const series = this.seriesResistance(y);
+    const conductance = this.busConductance();
+    const drawn = this.loadCurrent(y[0]!, t);
     const divided = 1 + series * conductance;
     const charging = (capacitance * this.conduction * this.sourceSlope(t)) / divided;
     const belongs = (this.conduction * this.sourceVoltage(t) - this.drop - series * (drawn + charging)) / divided - esr * charging;
@@ -211,20 +230,24 @@ export class Circuit {
     return 1 / Math.max(busRate, lineRate);
   }
 
+  /** The same equations as above in one pass: each quantity once, for this is where nearly all time is spent. */
   derivative = (dydt: Float64Array, y: Float64Array, t: number): void => {
-    const { source, bulk, elements, ambient } = this.path;
-    const line = this.lineCurrent(y, t);
-    const bus = this.busVoltage(y, line, t);
-    const capacitorCurrent = line - this.loadCurrent(y[0]!, t) - this.busConductance() * bus;
-    dydt[0] = capacitorCurrent / bulk.capacitance;
-    for (let k = 0; k < this.count; k += 1) {
-      const element = elements[k]!;
-      dydt[1 + k] = (this.bodyPower(k, y, line) - element.dissipation * (y[1 + k]! - ambient)) / element.heatCapacity;
-    }
+    const { bulk, elements, ambient } = this.path;
     const s = this.conduction;
+    const v = y[0]!;
+    const drawn = this.loadCurrent(v, t);
+    const conductance = this.busConductance();
+    const divided = 1 + bulk.esr * conductance;
+    const line = this.lineCurrent(y, t);
+    const bus = (v + bulk.esr * (line - drawn)) / divided;
+    dydt[0] = (line - drawn - conductance * bus) / bulk.capacitance;
+    for (let k = 0; k < this.count; k += 1) {
+      const { dissipation, heatCapacity } = elements[k]!;
+      dydt[1 + k] = (this.bodyPower(k, y, line) - dissipation * (y[1 + k]! - ambient)) / heatCapacity;
+    }
     dydt[this.count + 1] =
       s !== 0 && this.inductive
-        ? (s * this.sourceVoltage(t) - this.seriesResistance(y) * line - this.drop - bus) / source.inductance
+        ? (s * this.sourceVoltage(t) - this.seriesResistance(y) * line - this.drop - bus) / this.path.source.inductance
         : 0;
   };
 }

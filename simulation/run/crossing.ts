@@ -31,7 +31,8 @@ const SIDES_PER_TRY = 4;
 /** The half of the step in which a watch passes zero, or null. */
 const bracketOf = ({ value, rising }: Watch, { stepper, before, t, h }: TakenStep): { low: number; high: number } | null => {
   const sign = rising ? 1 : -1;
-  const [start, middle] = [sign * value(before, t), sign * value(stepper.middle, t + h / 2)];
+  const start = sign * value(before, t);
+  const middle = sign * value(stepper.middle, t + h / 2);
   // A current that has just begun is zero: it may rise first and end within the step.
   if (start > 0 || (start === 0 && middle >= 0)) return null;
   if (middle >= 0) return { low: 0, high: h / 2 };
@@ -41,10 +42,11 @@ const bracketOf = ({ value, rising }: Watch, { stepper, before, t, h }: TakenSte
 /** The earliest instant in a step at which watches pass zero; null where none does. */
 export const earliestCrossing = (watches: readonly Watch[], step: TakenStep): Crossing | null => {
   const { stepper, before, t } = step;
-  const brackets = watches.flatMap((watch) => {
+  const brackets: { watch: Watch; low: number; high: number }[] = [];
+  for (const watch of watches) {
     const bracket = bracketOf(watch, step);
-    return bracket ? [{ watch, ...bracket }] : [];
-  });
+    if (bracket) brackets.push({ watch, ...bracket });
+  }
   if (brackets.length === 0) return null;
   let sides = 0;
   const roots = brackets.map(({ watch: { value, apply }, low, high }) => {

@@ -27,6 +27,9 @@ const SEVERAL = 100;
 const NEARLY = 1e-9;
 /** Time constants in one step of two halves; each half is stable up to 2.78. */
 const STABLE = 5;
+/** Steps from the begin of a pulse to its crest, at least: of the first, which is reported, and of all others. */
+const FIRST_PARTS = 10;
+const LATER_PARTS = 3;
 /** Below these an error counts absolutely: K, share of the source amplitude, share of the largest current. */
 const FLOOR = { temperature: 1, bus: 0.2, current: 0.02 };
 
@@ -46,7 +49,7 @@ export class Waveform {
   private h: number;
   private steps = 0;
   /** Begin of the conduction that goes on, and from there to the next crest or zero; s. */
-  private pulse = { since: -Infinity, toCrest: 0 };
+  private pulse = { since: -Infinity, toCrest: 0, parts: 1 };
   private readonly stepper: DoubledStep;
   private readonly floor: Float64Array;
   /** What errors are measured against: the rise of a temperature and the swing of the bus, not their absolute values. */
@@ -176,7 +179,7 @@ export class Waveform {
     circuit.conduction = s;
     circuit.follows = false;
     this.steps = 0;
-    this.pulse = { since: this.t, toCrest: this.nextQuarter() - this.t };
+    this.pulse = { since: this.t, toCrest: this.nextQuarter() - this.t, parts: this.pulse.since < 0 ? FIRST_PARTS : LATER_PARTS };
     y[circuit.size - 1] = 0;
     circuit.inductive = circuit.needsInductance(y, drive > 1e-3 * circuit.path.source.amplitude);
     this.everInductive ||= circuit.inductive;
@@ -219,14 +222,15 @@ export class Waveform {
   }
 
   /**
-   * A pulse of any width is taken in six steps or more, or its heat would be summed too coarsely; and no step leaves
+   * A pulse of any width is taken in six steps or more, the first in twenty, or its heat would be summed too coarsely; and no step leaves
    * the stable region of the method, beyond which step doubling has a blind spot (whole step and halves agree, both wrong).
    */
   private longestStep(): number {
     const { circuit, pulse, t } = this;
-    const stable = STABLE * circuit.fastestTime(this.y);
-    if (circuit.conduction === 0 || circuit.path.source.kind === 'dc') return stable;
-    return Math.min(stable, Math.max(pulse.toCrest, t - pulse.since) / 3);
+    const fastest = circuit.fastestTime(this.y);
+    if (circuit.conduction === 0) return STABLE * fastest;
+    const begun = Math.max(Number.isFinite(pulse.toCrest) ? pulse.toCrest : fastest, t - pulse.since);
+    return Math.min(STABLE * fastest, begun / pulse.parts);
   }
 
   private stop(reason: 'step-too-small' | 'step-budget'): void {

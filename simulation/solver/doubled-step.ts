@@ -3,6 +3,11 @@ import rk4 from 'ode-rk4';
 /** Fills `dydt` with the derivative of `y` at time `t`. */
 export type Derivative = (dydt: Float64Array, y: Float64Array, t: number) => void;
 
+/** For a handful of numbers a loop is several times faster than `set`. */
+const copy = (from: Float64Array, to: Float64Array): void => {
+  for (let k = 0; k < to.length; k += 1) to[k] = from[k]!;
+};
+
 /**
  * One fourth-order Runge–Kutta step taken whole and once more in two halves; the difference estimates the error
  * (step doubling: E ≈ (y_halves − y_whole)/15) and is used to extrapolate the end to fifth order.
@@ -25,24 +30,24 @@ export class DoubledStep {
 
   take(from: Float64Array, t: number, h: number): void {
     const { stepper, whole, middle, end } = this;
-    stepper.y.set(from);
+    copy(from, stepper.y);
     stepper.t = t;
     stepper.dt = h;
     stepper.step();
-    whole.set(stepper.y);
-    stepper.y.set(from);
+    copy(stepper.y, whole);
+    copy(from, stepper.y);
     stepper.t = t;
     stepper.dt = h / 2;
     stepper.step();
-    middle.set(stepper.y);
+    copy(stepper.y, middle);
     stepper.step();
-    end.set(stepper.y);
+    copy(stepper.y, end);
   }
 
   /** One whole step alone, for locating an event inside a step already accepted; overwritten by the next call. */
   single(from: Float64Array, t: number, h: number): Float64Array {
     const { stepper } = this;
-    stepper.y.set(from);
+    copy(from, stepper.y);
     stepper.t = t;
     stepper.dt = h;
     stepper.step();
