@@ -9,7 +9,7 @@ export const element = (law: ResistanceLaw, more: Partial<PathElement> = {}): Pa
 export const resistor = (ohms: number, more: Partial<PathElement> = {}) => element(fixedLaw(ohms), more);
 
 /** A DC step into a capacitor through the elements alone, 25 °C. */
-export const directPath = (voltage: number, capacitance: number, elements: PathElement[], more: Partial<PowerPath> = {}): PowerPath => ({
+export const directPath = (voltage: number, capacitance: number, elements: readonly PathElement[], more: Partial<PowerPath> = {}): PowerPath => ({
   source: { kind: 'dc', amplitude: voltage, frequency: 0, phase: 0, resistance: 0, inductance: 0, programme: [] },
   elements,
   rectifier: { kind: 'none' },
@@ -21,7 +21,7 @@ export const directPath = (voltage: number, capacitance: number, elements: PathE
 });
 
 /** Mains through a bridge without losses of its own. */
-export const mainsPath = (amplitude: number, phase: number, capacitance: number, elements: PathElement[], more: Partial<PowerPath> = {}): PowerPath => ({
+export const mainsPath = (amplitude: number, phase: number, capacitance: number, elements: readonly PathElement[], more: Partial<PowerPath> = {}): PowerPath => ({
   ...directPath(amplitude, capacitance, elements),
   source: { kind: 'ac', amplitude, frequency: 50, phase, resistance: 0, inductance: 0, programme: [] },
   rectifier: { kind: 'bridge', forwardVoltage: 0, slopeResistance: 0 },
