@@ -1,5 +1,5 @@
 import { Redirect, useGlobalSearchParams, usePathname } from 'expo-router';
-import type { ReactNode } from 'react';
+import { useEffect, useState, type ReactNode } from 'react';
 import { View } from 'react-native';
 
 import { Notice } from '@/components/ui/Notice';
@@ -14,9 +14,14 @@ import { signInHref } from './wanted-address';
 export const Guard = ({ children }: { children: ReactNode }) => {
   const { data: session, error, refetch } = useSession();
   const pathname = usePathname();
-  const parameters = useGlobalSearchParams<{ selected?: string }>();
+  const { selected } = useGlobalSearchParams<{ selected?: string }>();
+  // While nobody is let through no route is mounted, and the router forgets which one the address named.
+  const [wanted, setWanted] = useState({ pathname, selected });
+  useEffect(() => {
+    if (session) setWanted({ pathname, selected });
+  }, [session, pathname, selected]);
   if (session) return children;
-  if (session === null) return <Redirect href={signInHref(pathname, parameters.selected)} />;
+  if (session === null) return <Redirect href={signInHref(wanted.pathname, wanted.selected)} />;
   return (
     <View style={{ flex: 1 }}>
       <PageHeader title="Tidegate" subtitle="Opening" />

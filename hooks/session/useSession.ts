@@ -32,7 +32,8 @@ export const useSignOut = () => {
   return useMutation({
     mutationFn: () => request<void>(API.session, { method: 'DELETE' }),
     onSuccess: () => {
-      queries.clear();
+      // The session itself stays in the cache: screens watch it, and a removed query tells them nothing.
+      queries.removeQueries({ predicate: ({ queryKey }) => queryKey[0] !== KEY[0] });
       queries.setQueryData<Session | null>(KEY, null);
     },
   });

@@ -8,19 +8,20 @@ let app: AppServer;
 let browser: Browser;
 let seen: Visit;
 
-beforeAll(async () => {
-  [app, browser] = await Promise.all([startApp(), openBrowser()]);
-}, 120_000);
-afterAll(async () => {
-  await browser.close();
-  await app.stop();
-});
 afterEach(async () => {
   await seen.context.close();
   expect(seen.problems).toEqual([]);
 });
 
 describe.each(EACH_SIZE)('The main job at %s size', (size) => {
+  // A product of its own for each size: what one has changed and saved must not be there for the other.
+  beforeAll(async () => {
+    [app, browser] = await Promise.all([startApp(), openBrowser()]);
+  }, 120_000);
+  afterAll(async () => {
+    await browser.close();
+    await app.stop();
+  });
   beforeEach(async () => {
     seen = await visit(browser, size);
   });

@@ -27,6 +27,14 @@ describe('a DC step', () => {
     within(run.figures.highestBus, 367.851096, 1e-3);
   });
 
+  // Critical resistance 2·√(L/C) of the series circuit: 0.922531208 Ω; textbooks.
+  it.each([[0.9, true], [0.95, false]])('swings over with %d Ω: %s', (ohms, over) => {
+    expect(2 * Math.sqrt(100e-6 / 470e-6)).toBeCloseTo(0.922531208, 8);
+    const path = directPath(325, 470e-6, []);
+    const { run } = powerUp({ ...path, source: { ...path.source, resistance: ohms, inductance: 100e-6 } }, { duration: 0.05, waveformOnly: true, tolerance: 1e-9 });
+    expect(run.figures.highestBus! > 325 * (1 + 1e-8)).toBe(over);
+  });
+
   // Only a DC step: the series resistance takes ½CV² whatever its value; textbooks, and by algebra for any R(T).
   it.each([0.1, 1, 10, 100])('loses ½CV² in %d Ω', (ohms) => {
     const { run } = powerUp(directPath(325, 470e-6, [resistor(ohms)]), { duration: 30 * ohms * 470e-6 + 0.02, waveformOnly: true });
