@@ -90,12 +90,6 @@ const sum = (values: readonly number[]) => values.reduce((total, one) => total +
 
 const highest = (run: Follow, pick: (row: Period) => number): number => Math.max(0, largest(run.periods.rows.map(pick)));
 
-const peakOf = (run: Follow): { value: number; at: number } => {
-  const { pulse, periods } = run;
-  const row = periods.rows.reduce<Period | null>((best, one) => (one.peak > (best?.peak ?? pulse.peak * (1 + 1e-6)) ? one : best), null);
-  return row ? { value: row.peak, at: (row.start + row.end) / 2 } : { value: pulse.peak, at: pulse.peakAt };
-};
-
 const tripFigures = ({ trip }: Follow, ending: Ending | null, power: number | null) => {
   const tripped = trip.at !== null;
   return {
@@ -124,15 +118,15 @@ const loadFigures = ({ happenings, underLoad }: Follow) => {
 
 export const figuresOf = (run: Follow): Figures => {
   const { pulse, wave, bypass } = run;
+  const crest = run.options.stopAt === 'first-pulse' ? { value: pulse.peak, at: pulse.peakAt } : run.crest;
   const ending = endingOf(run);
   const charged = chargedOf(run);
-  const peak = peakOf(run);
   const power = bodyLoss(run, ending);
   const loss = ending && run.path.elements.length > 0 ? ending.rms ** 2 * run.circuit.elementsResistance(wave.y) : null;
   const highestBus = Math.max(highest(run, (row) => row.highestBus), run.endCycle?.highestBus ?? 0, wave.tally.end.bus);
   return {
-    peakCurrent: peak.value,
-    peakCurrentAt: peak.at,
+    peakCurrent: crest.value,
+    peakCurrentAt: crest.at,
     pulseWidthHalf: pulse.width(0.5),
     pulseWidthTenth: pulse.width(0.1),
     firstPulseI2t: pulse.i2t,
@@ -151,7 +145,7 @@ export const figuresOf = (run: Follow): Figures => {
     finalBusLow: ending?.lowestBus ?? null,
     ...loadFigures(run),
     bypassClosedAt: bypass.closedAt,
-    bypassSecondPeak: bypass.peak,
+    bypassSecondPeak: bypass.crest?.value ?? null,
     bypassVoltage: bypass.voltage,
     ...tripFigures(run, ending, power),
     timeToDischarge: dischargeTime(highestBus, run.path),

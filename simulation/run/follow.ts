@@ -1,6 +1,7 @@
 import type { RunEvent } from '../../shared/model/result';
 import { Circuit } from '../circuit/circuit';
 import type { PowerPath } from '../circuit/path';
+import { Crest } from './crest';
 import { CycleMap } from './cycle-map';
 import { Drift, type DriftResult } from './drift';
 import { FirstPulse } from './first-pulse';
@@ -42,6 +43,8 @@ export class Follow {
   readonly periods: Periods;
   readonly history: History;
   readonly pulse: FirstPulse;
+  /** Of the whole run, soaks apart. */
+  readonly crest: Crest;
   readonly soaked: { from: number; points: SoakPoint[]; offset: { i2t: number; source: number; energy: number[] } }[] = [];
   readonly startTemperatures: number[];
   readonly pulses = { expected: 0, found: 0 };
@@ -52,7 +55,7 @@ export class Follow {
   soakSides = 0;
   hiccups = false;
   readonly hottest: number[];
-  readonly bypass = { closedAt: null as number | null, voltage: null as number | null, peak: null as number | null };
+  readonly bypass = { closedAt: null as number | null, voltage: null as number | null, crest: null as Crest | null };
   underLoad = { start: null as number | null, lowest: Infinity, ended: false };
   readonly trip: TripRecord;
   private readonly budget: number;
@@ -75,6 +78,7 @@ export class Follow {
     this.periods = new Periods(this.wave);
     this.history = new History(this.wave);
     this.pulse = new FirstPulse(this.wave);
+    this.crest = new Crest(this.wave);
     this.trip = new TripRecord(this.wave, this.periods);
     this.run();
   }
@@ -131,12 +135,13 @@ export class Follow {
   private onStep = (wave: Waveform, from: number, h: number): void => {
     const { pulse, history, periods, happenings } = this;
     pulse.add(from, h);
+    this.crest.add(from, h);
     periods.add();
     if (wave.t <= FOLD || !pulse.ended) history.add(from, h);
     for (let k = 0; k < this.hottest.length; k += 1) this.hottest[k] = Math.max(this.hottest[k]!, wave.y[1 + k]!);
     this.countPulse();
     this.followEvents();
-    this.followBypass();
+    this.followBypass(from, h);
     this.followLoad();
     this.trip.byCurrent();
     happenings.openIfBlocked();
@@ -171,20 +176,20 @@ export class Follow {
     }
   }
 
-  private followBypass(): void {
+  private followBypass(from: number, h: number): void {
     const { bypass, wave, periods, happenings } = this;
     if (happenings.firstClosing && bypass.closedAt === null) {
       const { at, voltage } = happenings.firstClosing;
-      Object.assign(bypass, { closedAt: at, voltage, peak: 0 });
+      Object.assign(bypass, { closedAt: at, voltage, crest: new Crest(wave) });
     }
     if (bypass.closedAt === null || wave.t > bypass.closedAt + Math.max(2 * periods.length, 0.05)) return;
-    const { start, middle, end } = wave.tally;
-    bypass.peak = Math.max(bypass.peak!, Math.abs(start.line), Math.abs(middle.line), Math.abs(end.line));
+    bypass.crest!.add(from, h);
   }
 
   private followLoad(): void {
     if (this.circuit.loadSince === null || this.underLoad.ended) return;
-    this.underLoad.lowest = Math.min(this.underLoad.lowest, this.wave.tally.end.bus);
+    const { start, middle, end } = this.wave.tally;
+    this.underLoad.lowest = Math.min(this.underLoad.lowest, start.bus, middle.bus, end.bus);
   }
 
   private readyToSoak(): boolean {
