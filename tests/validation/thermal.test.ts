@@ -1,3 +1,4 @@
+import type { PathElement } from '../../simulation/circuit/path';
 import { bValueLaw } from '../../simulation/laws/b-value';
 import { fixedLaw } from '../../simulation/laws/fixed';
 import { polymerPtcLaw } from '../../simulation/laws/polymer-ptc';
@@ -17,10 +18,10 @@ const integral = (f: (x: number) => number, from: number, to: number, pieces = 2
 
 const within = (value: number | null | undefined, expected: number, relative: number) => expect(Math.abs((value ?? NaN) / expected - 1)).toBeLessThan(relative);
 
-/** A current of 10 kV through 10 kV/I: what a source of constant current would drive. */
-const constantCurrent = (amperes: number, body: ReturnType<typeof element>, duration: number) => {
-  const path = directPath(1e5, 1e-3, [body], { load: { kind: 'resistance', resistance: 1e5 / amperes } });
-  return powerUp({ ...path, source: { ...path.source, resistance: 1e-3 }, bulk: { ...path.bulk, initialVoltage: 1e5 } }, { duration, waveformOnly: true }).run;
+/** A megavolt and a resistance to match next to the body, across a capacitor too small to tell: a constant current. */
+const constantCurrent = (amperes: number, body: PathElement, duration: number, ambient = T0) => {
+  const path = directPath(1e6, 1e-9, [body], { load: { kind: 'resistance', resistance: 1e6 / amperes }, ambient });
+  return powerUp({ ...path, source: { ...path.source, resistance: 1e-3 }, bulk: { ...path.bulk, initialVoltage: 1e6 } }, { duration, waveformOnly: true }).run;
 };
 
 describe('a DC step into an NTC without heat loss', () => {
@@ -69,10 +70,7 @@ describe('a body under constant current', () => {
   it.each([[2, 1.438410362], [5, 0.204109973]])('with heat loss reaches the temperature of trip at %d times its hold current after %d s', (times, expected) => {
     const hold = Math.sqrt((0.01 * 102) / 0.1);
     expect(hold).toBeCloseTo(3.193743885, 8);
-    const path = element(fixedLaw(0.1), { dissipation: 0.01, heatCapacity: 0.05 });
-    const volts = 1e5;
-    const line = directPath(volts, 1e-3, [path], { load: { kind: 'resistance', resistance: volts / (times * hold) }, ambient: 296.15 });
-    const { run } = powerUp({ ...line, source: { ...line.source, resistance: 1e-3 }, bulk: { ...line.bulk, initialVoltage: volts } }, { duration: expected, waveformOnly: true });
+    const run = constantCurrent(times * hold, element(fixedLaw(0.1), { dissipation: 0.01, heatCapacity: 0.05 }), expected, 296.15);
     expect(Math.abs(run.elements[0]!.finalTemperature - 398.15)).toBeLessThan(0.1);
   });
 });
