@@ -17,6 +17,8 @@ export interface Callout {
 const OVER_NOMINAL = 1.05;
 const OVER_REST = 1.5;
 const LEAD = 15;
+/** px over the nominal line, below which a word would stand on that line's own name. */
+const CLEARANCE = 22;
 
 const highest = (values: readonly number[]): number => values.reduce((best, value, index) => (value > (values[best] ?? -Infinity) ? index : best), 0);
 const median = (values: readonly number[]): number => [...values].sort((a, b) => a - b)[Math.floor(values.length / 2)] ?? 0;
@@ -30,6 +32,7 @@ const peakCallouts = (lane: Lane, own: LaneRoom, room: PlotRoom, scale: TimeScal
     const nominal = Math.max(0, ...lane[half].value);
     if (value === undefined || time === undefined || value < nominal * OVER_NOMINAL) return [];
     if (half === 'soak' && value < OVER_REST * median(band.high)) return [];
+    if (half === 'soak' && own.toY(nominal) - own.toY(value) < CLEARANCE) return [];
     const short = `worst ${Number(value.toPrecision(3))} ${lane.unit}`;
     const text = room.narrow ? short : `worst corner ${Number(value.toPrecision(3))} ${lane.unit} at ${timeText(time)}`;
     const tip = { x: scale.toX(time), y: own.toY(value) };
