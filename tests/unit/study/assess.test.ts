@@ -5,7 +5,14 @@ import type { Scenario, ScenarioInput } from '../../../shared/model/scenario';
 import { assess } from '../../../simulation';
 import { bypassScenario, limiterWith, mainsScenario, railScenario } from '../../support/study-scenarios';
 
-const verdictOnly = (scenario: Scenario): Assessment => assess(scenario, { envelope: false });
+/** Many statements are about the same few scenarios; each is assessed once. */
+const assessed = new Map<string, Assessment>();
+const verdictOnly = (scenario: Scenario): Assessment => {
+  const key = JSON.stringify(scenario);
+  const known = assessed.get(key) ?? assess(scenario, { envelope: false });
+  assessed.set(key, known);
+  return known;
+};
 const checkOf = ({ checks }: Assessment, id: CheckId): Check | undefined => checks.find((check) => check.id === id);
 const idsOf = ({ checks }: Assessment): CheckId[] => checks.map(({ id }) => id);
 
