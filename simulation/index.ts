@@ -1,3 +1,3 @@
 export { ENGINE_VERSION } from './engine-version';
-export { resistanceCurve } from './study/resistance-curve';
+export { resistanceAt25, resistanceCurve } from './study/resistance-curve';
 export { assess, simulate, type AssessOptions } from './study/assess';

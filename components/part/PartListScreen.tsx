@@ -16,7 +16,7 @@ import { useParts } from '@/hooks/part/useParts';
 import type { PartSummary } from '@/shared/contracts/part';
 import type { PartKind } from '@/shared/model/part';
 
-import { KIND_SHORT, listedResistance } from './part-figures';
+import { KIND_SHORT } from './part-figures';
 
 type KindFilter = PartKind | 'all';
 const KINDS: readonly { value: KindFilter; label: string }[] = [
@@ -38,7 +38,7 @@ const NameCell = ({ id, part }: PartSummary) => (
 const COLUMNS: readonly Column<PartSummary>[] = [
   { key: 'name', title: 'Part', width: 176, render: (row) => <NameCell {...row} /> },
   { key: 'kind', title: 'Kind', width: 84, render: ({ part }) => <Text variant="label">{KIND_SHORT[part.kind]}</Text> },
-  { key: 'resistance', title: 'R25, R', width: 96, align: 'right', render: ({ part }) => <Quantity value={listedResistance(part)} dimension="resistance" variant="label" /> },
+  { key: 'resistance', title: 'R25', width: 96, align: 'right', render: ({ resistance25 }) => <Quantity value={resistance25} dimension="resistance" variant="label" /> },
   { key: 'b', title: 'B (25/85)', width: 96, align: 'right', render: ({ part }) => (part.law.law === 'b-value' ? <Quantity value={part.law.b.nominal} dimension="temperatureInterval" variant="label" /> : <Text variant="label" tone="quiet">–</Text>) },
   { key: 'current', title: 'Steady current', width: 116, align: 'right', render: ({ part }) => <Quantity value={part.ratings.steadyCurrent?.current ?? null} dimension="current" kind="rms" variant="label" /> },
   { key: 'energy', title: 'Energy', width: 96, align: 'right', render: ({ part }) => <Quantity value={part.ratings.energy?.energy ?? null} dimension="energy" variant="label" /> },

@@ -81,13 +81,6 @@ export const figuresOf = (part: Part): PartFigure[] => [...lawFigures(part), ...
 
 export const isGiven = ({ min, typical, max }: PartFigure) => min !== null || typical !== null || max !== null;
 
-/** The resistance that a list shows, in Ω: R25, the low resistance of a PTC, or the resistor's; null where only a table is given. */
-export const listedResistance = ({ law }: Part): number | null => {
-  if (law.law === 'b-value') return law.r25.nominal;
-  if (law.law === 'sigmoid') return law.low.nominal;
-  return law.law === 'fixed' ? law.resistance.nominal : null;
-};
-
 export const KIND_TEXT: Record<Part['kind'], string> = {
   ntc: 'NTC inrush current limiter',
   'polymer-ptc': 'Polymer PTC resettable fuse',

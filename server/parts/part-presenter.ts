@@ -1,5 +1,5 @@
 import type { PartRecord, PartSummary, ResistanceCurve } from '../../shared/contracts/part';
-import { resistanceCurve } from '../../simulation';
+import { resistanceAt25, resistanceCurve } from '../../simulation';
 import type { ScenarioRow } from '../scenarios/scenario-entity';
 import type { PartRow } from './part-entity';
 
@@ -8,6 +8,7 @@ export const presentPart = (row: PartRow): PartSummary => ({
   revision: row.revision,
   approvedBy: row.approvedBy?.name ?? null,
   part: row.document,
+  resistance25: resistanceAt25(row.document),
 });
 
 /** A law without end (a fixed resistor) holds as far as the curve goes; JSON has no infinity. */

@@ -8,6 +8,7 @@ export const partSummarySchema = z.object({
   revision: z.number().int(),
   approvedBy: z.string().nullable(),
   part: partSchema,
+  resistance25: z.number().describe('Zero-power resistance at 25 °C by the part\'s law, nominal, Ω'),
 });
 export type PartSummary = z.output<typeof partSummarySchema>;
 

@@ -15,6 +15,11 @@ const hottestOf = ({ law, ratings }: Part): number => {
   return law.law === 'sigmoid' ? law.midpoint + BEYOND_KNEE : HOTTEST;
 };
 
+const REFERENCE = 298.15;
+
+/** Zero-power resistance at 25 °C by the part's law, nominal, Ω; a table or Steinhart–Hart coefficients state none. */
+export const resistanceAt25 = (part: Part): number => pathElement({ part }, { resistance: 'nominal', b: 'nominal' }).law.resistance(REFERENCE);
+
 const LEVELS: readonly Level[] = ['low', 'nominal', 'high'];
 
 /** R (Ω) against body temperature (K) from −55 °C to the maximum body temperature, with the band of all tolerances. */

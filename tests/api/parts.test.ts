@@ -65,7 +65,7 @@ describe('the list', () => {
 
 describe('a part', () => {
   test('comes with who approved it and where its figures come from', async () => {
-    expect(await read(ids.ntc!)).toMatchObject({ revision: 1, approvedBy: server.people.admin.name, provenance: PROVENANCE, part: partSchema.parse(samplePart()) });
+    expect(await read(ids.ntc!)).toMatchObject({ revision: 1, approvedBy: server.people.admin.name, provenance: PROVENANCE, part: partSchema.parse(samplePart()), resistance25: 10 });
     expect((await read(ids.resistor!)).approvedBy).toBeNull();
   });
 

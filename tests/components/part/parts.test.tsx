@@ -15,6 +15,7 @@ const record: PartRecord = {
   id: ID,
   revision: 2,
   approvedBy: 'Palesa Drumm',
+  resistance25: 10,
   part,
   curve: { temperature: [273.15, 298.15, 373.15], nominal: [25, 10, 1.3], low: [20, 8, 1], high: [30, 12, 1.6], valid: { min: 273.15, max: 443.15 } },
   provenance: [{ figure: 'law.r25', document: 'Sheet 3', page: 'p. 2', condition: 'zero power' }],
