@@ -1,5 +1,5 @@
 import { Redirect, useGlobalSearchParams, usePathname } from 'expo-router';
-import { useEffect, useState, type ReactNode } from 'react';
+import { useState, type ReactNode } from 'react';
 import { View } from 'react-native';
 
 import { Notice } from '@/components/ui/Notice';
@@ -16,12 +16,11 @@ export const Guard = ({ children }: { children: ReactNode }) => {
   const pathname = usePathname();
   const { selected } = useGlobalSearchParams<{ selected?: string }>();
   // While nobody is let through no route is mounted, and the router forgets which one the address named.
-  const [wanted, setWanted] = useState({ pathname, selected });
-  useEffect(() => {
-    if (session) setWanted({ pathname, selected });
-  }, [session, pathname, selected]);
+  const here = signInHref(pathname, selected);
+  const [door, setDoor] = useState(here);
+  if (session && door !== here) setDoor(here);
   if (session) return children;
-  if (session === null) return <Redirect href={signInHref(wanted.pathname, wanted.selected)} />;
+  if (session === null) return <Redirect href={door} />;
   return (
     <View style={{ flex: 1 }}>
       <PageHeader title="Tidegate" subtitle="Opening" />
