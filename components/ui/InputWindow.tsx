@@ -1,6 +1,7 @@
 import { useId, type ReactNode, type Ref } from 'react';
-import { TextInput, View } from 'react-native';
+import { Platform, TextInput, View } from 'react-native';
 
+import { selectUntouched } from './select-untouched';
 import { FAMILY, Text } from './Text';
 import { useTheme } from './theme';
 import { RADIUS, type ColorName } from './tokens';
@@ -25,7 +26,7 @@ export interface InputWindowProps {
 }
 
 /** One quantity: label and echo at the left, at the right a window sunk into the panel. */
-export const InputWindow = ({ label, echo, note, error, inputRef, ...input }: InputWindowProps) => {
+export const InputWindow = ({ label, echo, note, error, inputRef, onFocus, ...input }: InputWindowProps) => {
   const { colors } = useTheme();
   const id = useId();
   return (
@@ -46,7 +47,11 @@ export const InputWindow = ({ label, echo, note, error, inputRef, ...input }: In
         autoCapitalize="none"
         autoCorrect={false}
         spellCheck={false}
-        selectTextOnFocus
+        selectTextOnFocus={Platform.OS !== 'web'}
+        onFocus={(event) => {
+          selectUntouched(event);
+          onFocus?.();
+        }}
         placeholderTextColor={colors.quiet}
         style={{
           width: 108,
